@@ -1,0 +1,38 @@
+import type { FeedRow, RecordState, RecordType } from './protocol'
+
+/** A record as the server last showed it to this phone. */
+export type BaseRecord = {
+  type: RecordType
+  id: string
+  ver: number
+  state: 'live' | 'deleted'
+  data: Record<string, unknown> | null
+  /** The feeds through which this phone may see it. */
+  scopes: string[]
+}
+
+/** Version of a record that was kept through a restore of the server: any answer replaces it. */
+export const UNSURE_VERSION = 0
+
+/**
+ * A row of a feed laid on what the phone holds. An older version never
+ * replaces a newer one; a record that no feed shows any more is null.
+ */
+export function withFeedRow(base: BaseRecord | null, scope: string, row: FeedRow): BaseRecord | null {
+  if (row.state === 'revoked') return base ? withoutScope(base, scope) : null
+  return withState(base, scope, { ...row, state: row.state })
+}
+
+/** What an answer says of a record, laid on what the phone holds. */
+export function withState(base: BaseRecord | null, scope: string, told: RecordState): BaseRecord | null {
+  if (told.state === 'revoked') return base
+  const scopes = base ? [...new Set([...base.scopes, scope])] : [scope]
+  if (base && base.ver >= told.ver) return { ...base, scopes }
+  return { type: told.type, id: told.id, ver: told.ver, state: told.state, data: told.data, scopes }
+}
+
+/** The record without one of its feeds; null when it was the last. */
+export function withoutScope(base: BaseRecord, scope: string): BaseRecord | null {
+  const scopes = base.scopes.filter(other => other !== scope)
+  return scopes.length > 0 ? { ...base, scopes } : null
+}

@@ -1,0 +1,20 @@
+import { defineStore } from 'pinia'
+import { useSave } from '~/composables/useSave'
+import type { Conflict } from '#shared/domain/conflict.schema'
+import type { SaveOutcome, View } from '~/types/view'
+import { useJournalStore } from './journal'
+
+/** Fields with two kept values, until somebody chooses. */
+export const useConflictsStore = defineStore('conflicts', () => {
+  const journal = useJournalStore()
+  const { save } = useSave()
+
+  const openOf = (entityId: string): View<Conflict>[] => [...journal.shelves.conflict.values()]
+    .filter(conflict => conflict.data.entityId === entityId && conflict.data.resolvedAt === null)
+
+  const choose = (id: string, choice: 'standing' | 'other'): Promise<SaveOutcome> => (
+    save([{ kind: 'resolve', entityType: 'conflict', entityId: id, fields: { choice } }])
+  )
+
+  return { openOf, choose }
+})

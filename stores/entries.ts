@@ -1,0 +1,69 @@
+import { defineStore } from 'pinia'
+import { computed } from 'vue'
+import { liesInFuture } from '#shared/domain/entry.schema'
+import type { Entry, EntryFields } from '#shared/domain/entry.schema'
+import type { PhotoSubject } from '#shared/domain/photo.schema'
+import type { ChangeRequest } from '#shared/sync/outbox'
+import { useSave } from '~/composables/useSave'
+import type { PreparedPhoto, SaveOutcome, View } from '~/types/view'
+import { useJournalStore } from './journal'
+
+/** A photo chosen for an entry, with what it shows. */
+export type ChosenPhoto = { subject: PhotoSubject, prepared: PreparedPhoto }
+
+/** Visits. */
+export const useEntriesStore = defineStore('entries', () => {
+  const journal = useJournalStore()
+  const { save, newId } = useSave()
+
+  const newestFirst = (left: View<Entry>, right: View<Entry>) => (
+    right.data.occurredAt.localeCompare(left.data.occurredAt) || right.id.localeCompare(left.id)
+  )
+  const byPlant = computed(() => {
+    const groups = new Map<string, View<Entry>[]>()
+    for (const entry of journal.shelves.entry.values()) {
+      const group = groups.get(entry.data.plantId)
+      if (group) group.push(entry)
+      else groups.set(entry.data.plantId, [entry])
+    }
+    for (const group of groups.values()) group.sort(newestFirst)
+    return groups
+  })
+
+  const ofPlant = (plantId: string): View<Entry>[] => byPlant.value.get(plantId) ?? []
+  const latest = (plantId: string): View<Entry> | null => ofPlant(plantId)[0] ?? null
+  const byId = (id: string): View<Entry> | null => journal.shelves.entry.get(id) ?? null
+
+  /** Saves one visit with its photos, in one step on the phone. */
+  async function create(fields: EntryFields, photos: ChosenPhoto[]): Promise<SaveOutcome> {
+    if (liesInFuture(fields.occurredAt, journal.phone?.around.now() ?? 0)) {
+      return { ok: false, message: 'This visit lies in the future. Set when it happened; nothing was lost.', issues: [{ path: 'occurredAt', message: 'lies in the future' }] }
+    }
+    const entryId = newId()
+    const withIds = photos.map(photo => ({ ...photo, photoId: newId() }))
+    return save([
+      { kind: 'create', entityType: 'entry', entityId: entryId, fields: { ...fields } },
+      ...withIds.map((photo): ChangeRequest => photoRequest(photo.photoId, entryId, fields.plantId, photo)),
+    ], {
+      photos: withIds.map(({ photoId, prepared }) => ({ photoId, sha256: prepared.sha256, bytes: prepared.bytes })),
+      endDraftOf: fields.plantId,
+    })
+  }
+
+  const change = (id: string, fields: Partial<EntryFields>): Promise<SaveOutcome> => (
+    save([{ kind: 'patch', entityType: 'entry', entityId: id, fields: { ...fields } }])
+  )
+  const remove = (id: string): Promise<SaveOutcome> => save([{ kind: 'delete', entityType: 'entry', entityId: id, fields: {} }])
+
+  return { ofPlant, latest, byId, create, change, remove }
+})
+
+function photoRequest(photoId: string, entryId: string, plantId: string, { subject, prepared }: ChosenPhoto): ChangeRequest {
+  const { sha256, widthPx, heightPx, takenAt, bytes } = prepared
+  return {
+    kind: 'create',
+    entityType: 'photo',
+    entityId: photoId,
+    fields: { plantId, entryId, subject, sha256, byteLength: bytes.byteLength, widthPx, heightPx, takenAt },
+  }
+}

@@ -1,0 +1,26 @@
+import { defineStore } from 'pinia'
+import { computed } from 'vue'
+import type { Photo } from '#shared/domain/photo.schema'
+import type { View } from '~/types/view'
+import { useJournalStore } from './journal'
+
+/** Photos of visits. Their pictures are found by `usePicture`. */
+export const usePhotosStore = defineStore('photos', () => {
+  const journal = useJournalStore()
+
+  const byEntry = computed(() => {
+    const groups = new Map<string, View<Photo>[]>()
+    for (const photo of journal.shelves.photo.values()) {
+      const group = groups.get(photo.data.entryId)
+      if (group) group.push(photo)
+      else groups.set(photo.data.entryId, [photo])
+    }
+    for (const group of groups.values()) group.sort((left, right) => left.id.localeCompare(right.id))
+    return groups
+  })
+  const ofEntry = (entryId: string): View<Photo>[] => byEntry.value.get(entryId) ?? []
+  /** True while the picture itself waits on this phone. */
+  const isUploading = (photoId: string): boolean => journal.waiting.uploads.some(item => item.photoId === photoId)
+
+  return { ofEntry, isUploading }
+})
