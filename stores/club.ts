@@ -9,6 +9,7 @@ import { useJournalStore } from './journal'
 import { useSyncStore } from './sync'
 
 const invitationSchema = z.object({ id: z.string(), role: z.enum(CLUB_ROLES), usesLeft: z.int(), expiresAt: z.string() })
+const placeSchema = z.object({ club: z.object({ id: z.string() }) })
 const previewSchema = z.object({ clubName: z.string(), role: z.enum(CLUB_ROLES) })
 
 /** The clubs this person belongs to. Reading works without signal; making and managing ask the server. */
@@ -43,14 +44,14 @@ export const useClubStore = defineStore('club', () => {
     membersOf,
     myRole,
     person,
-    create: (name: string) => afterwards(request('POST', '/api/clubs', z.object({ id: z.string() }), { name })),
+    create: (name: string) => afterwards(request('POST', '/api/clubs', placeSchema, { name })),
     invitations: (clubId: string) => request('GET', path(clubId, '/invitations'), z.object({ invitations: z.array(invitationSchema) })),
     invite: (clubId: string, form: InvitationRequest) => request(
       'POST', path(clubId, '/invitations'), z.object({ invitation: invitationSchema, token: z.string() }), form,
     ),
     withdraw: (clubId: string, invitationId: string) => request('DELETE', path(clubId, `/invitations/${invitationId}`), z.unknown()),
     preview: (token: string) => request('GET', `/api/invitations/${encodeURIComponent(token)}`, previewSchema),
-    accept: (token: string) => afterwards(request('POST', `/api/invitations/${encodeURIComponent(token)}/accept`, z.object({ clubId: z.string() }), {})),
+    accept: (token: string) => afterwards(request('POST', `/api/invitations/${encodeURIComponent(token)}/accept`, placeSchema, {})),
     changeRole: (clubId: string, accountId: string, role: ClubRole) => afterwards(
       request('PATCH', path(clubId, `/members/${accountId}`), z.unknown(), { role }),
     ),

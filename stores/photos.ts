@@ -1,12 +1,14 @@
 import { defineStore } from 'pinia'
 import { computed } from 'vue'
-import type { Photo } from '#shared/domain/photo.schema'
-import type { View } from '~/types/view'
+import type { Photo, PhotoSubject } from '#shared/domain/photo.schema'
+import { useSave } from '~/composables/useSave'
+import type { SaveOutcome, View } from '~/types/view'
 import { useJournalStore } from './journal'
 
 /** Photos of visits. Their pictures are found by `usePicture`. */
 export const usePhotosStore = defineStore('photos', () => {
   const journal = useJournalStore()
+  const { save } = useSave()
 
   const byEntry = computed(() => {
     const groups = new Map<string, View<Photo>[]>()
@@ -22,5 +24,10 @@ export const usePhotosStore = defineStore('photos', () => {
   /** True while the picture itself waits on this phone. */
   const isUploading = (photoId: string): boolean => journal.waiting.uploads.some(item => item.photoId === photoId)
 
-  return { ofEntry, isUploading }
+  const changeSubject = (id: string, subject: PhotoSubject): Promise<SaveOutcome> => (
+    save([{ kind: 'patch', entityType: 'photo', entityId: id, fields: { subject } }])
+  )
+  const remove = (id: string): Promise<SaveOutcome> => save([{ kind: 'delete', entityType: 'photo', entityId: id, fields: {} }])
+
+  return { ofEntry, isUploading, changeSubject, remove }
 })

@@ -38,6 +38,23 @@ export const usePlantsStore = defineStore('plants', () => {
     return outcome.ok ? { ok: true, id: plantId } : outcome
   }
 
+  /**
+   * Changes a plant and what it stands in, in one step on the phone. A vessel
+   * without an id is new and the plant moves into it.
+   */
+  function revise(id: string, fields: Partial<PlantFields>, vessel: { id: string | null, fields: Partial<VesselFields> } | null): Promise<SaveOutcome> {
+    const requests: ChangeRequest[] = []
+    const moved = { ...fields }
+    if (vessel?.id === null) {
+      moved.vesselId = newId()
+      requests.push({ kind: 'create', entityType: 'vessel', entityId: moved.vesselId, fields: { ...vessel.fields } })
+    } else if (vessel?.id && Object.keys(vessel.fields).length > 0) {
+      requests.push({ kind: 'patch', entityType: 'vessel', entityId: vessel.id, fields: { ...vessel.fields } })
+    }
+    if (Object.keys(moved).length > 0) requests.push({ kind: 'patch', entityType: 'plant', entityId: id, fields: moved })
+    return requests.length > 0 ? save(requests) : Promise.resolve({ ok: true, id })
+  }
+
   const change = (id: string, fields: Partial<PlantFields>): Promise<SaveOutcome> => (
     save([{ kind: 'patch', entityType: 'plant', entityId: id, fields: { ...fields } }])
   )
@@ -46,5 +63,5 @@ export const usePlantsStore = defineStore('plants', () => {
   )
   const remove = (id: string): Promise<SaveOutcome> => save([{ kind: 'delete', entityType: 'plant', entityId: id, fields: {} }])
 
-  return { own, shared, vessels, byId, vesselById, isMine, create, change, changeVessel, remove }
+  return { own, shared, vessels, byId, vesselById, isMine, create, revise, change, changeVessel, remove }
 })

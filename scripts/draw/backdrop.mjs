@@ -64,9 +64,9 @@ function pottedRow(random, tones, width, wallY, floorY) {
     const size = random.between(34, 64)
     const y = floorY + random.between(-6, 26)
     const clay = vary(random, random.chance(0.65) ? [0.62, 0.11, 45] : [0.4, 0.04, 210], 1)
-    const crown = Array.from({ length: 9 }, () => {
+    const crown = Array.from({ length: 20 }, () => {
       const tone = vary(random, blend([0.58, 0.13, 135], tones.glow, 0.12), 2.4)
-      return ellipse(x + random.around(0, size * 1.3), y - size * 1.5 - random.between(0, (floorY - wallY) * 0.42), size * random.between(0.3, 0.75), size * random.between(0.3, 0.7), tone)
+      return ellipse(x + random.around(0, size * 1.5), y - size * 1.5 - random.between(0, 1) ** 1.4 * (floorY - wallY) * 0.5, size * random.between(0.2, 0.55), size * random.between(0.2, 0.5), tone)
     })
     return group({ opacity: 0.92 }, ellipse(x + size * 0.4, y, size * 1.3, size * 0.24, [0.2, 0.04, 50, 0.4]), crown,
       fill(`M${x - size} ${y - size * 1.4}h${size * 2}l${-size * 0.3} ${size * 1.4}h${-size * 1.4}Z`, clay), rectangle(x - size * 1.1, y - size * 1.5, size * 2.2, size * 0.34, lighter(clay, 0.07)))

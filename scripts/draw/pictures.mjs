@@ -21,9 +21,9 @@ const tomatoRoots = day => (gap, more) => () => rootsScene({ ...tomato, day, gap
 const tomatoWhole = plant => () => wholeScene({ kind: 'tomato', seed: 'button', plant })
 const aubergine = { seed: 'plum', vessel: BUCKET, count: 26, tone: [0.4, 0.05, 245], cmPerDay: 1 }
 const aubergineWhole = (light, plant) => () => wholeScene({ kind: 'aubergine', seed: 'plum', light, vessel: { tone: 'blue' }, plant })
-const doorVessel = { top: 150, bottom: 132, height: 232, cup: 62, tone: 'cream' }
-const basilWhole = (seed, vessel, plant, light) => () => wholeScene({ kind: 'basil', seed, light, vessel, at: [480, 970], plant })
-const lettuce = { seed: 'row', vessel: TOTE, count: 15, tone: [0.62, 0.03, 85], cmPerDay: 0.6, lastBirth: 14 }
+const doorVessel = { top: 190, bottom: 168, height: 290, cup: 76, tone: 'cream' }
+const basilWhole = (seed, vessel, plant, light) => () => wholeScene({ kind: 'basil', seed, light, vessel, at: [480, 905], plant })
+const lettuce = { seed: 'row', vessel: TOTE, count: 24, tone: [0.62, 0.03, 85], cmPerDay: 0.6, lastBirth: 16, clump: 0.62 }
 const tote = more => () => toteScene({ seed: 'row', ...more })
 
 export const pictures = {
@@ -44,11 +44,11 @@ export const pictures = {
   'tomato-fruit-42': () => trussScene({ seed: 'button', fruits: [0.95, 0.7, 0.4, 0.12, 0.03, 0] }),
   'tomato-harvest-47': () => tomatoHarvest({ seed: 'button', count: 18 }),
 
-  'basil-whole-03': basilWhole('door', doorVessel, { height: 220, pairs: 3, stems: 2, shoots: false }, 'morning'),
+  'basil-whole-03': basilWhole('door', doorVessel, { height: 270, pairs: 3, stems: 3, shoots: false }, 'morning'),
   'basil-leaf-07': () => leafScene({ kind: 'basil', seed: 'door-leaf', dew: 5, light: 'noon' }),
   'basil-leaf-18': () => leafScene({ kind: 'basil', seed: 'door-leaf', yellow: 0.85, light: 'noon' }),
-  'basil-whole-18': basilWhole('door', doorVessel, { height: 420, pairs: 5, yellowTop: 0.95 }, 'noon'),
-  'basil-roots-18': () => rootsScene({ seed: 'door', vessel: TUB, day: 18, gap: 4, count: 24, fuzz: 0.5, cmPerDay: 0.75, tone: [0.62, 0.03, 85] }),
+  'basil-whole-18': basilWhole('door', doorVessel, { height: 540, pairs: 5, yellowTop: 0.95 }, 'noon'),
+  'basil-roots-18': () => rootsScene({ seed: 'door', vessel: TUB, day: 18, gap: 4, count: 32, fuzz: 0.5, clump: 0.7, cmPerDay: 0.75, tone: [0.62, 0.03, 85] }),
   'basil-leaf-26': () => leafScene({ kind: 'basil', seed: 'door-leaf', yellow: 0.22, neighbours: 0.3, light: 'noon' }),
   'basil-harvest-29': () => basilHarvest({ seed: 'door' }),
 
@@ -62,8 +62,8 @@ export const pictures = {
   'lettuce-whole-34': tote({ size: 1, leaves: 19 }),
   'lettuce-harvest-36': () => lettuceHarvest({ seed: 'row' }),
 
-  'bottle-basil-roots-08': () => rootsScene({ seed: 'kitchen', vessel: BOTTLE, day: 8, gap: 1, count: 18, cmPerDay: 0.8, tone: [0.7, 0.012, 230], lastBirth: 14 }),
-  'bottle-basil-whole-20': basilWhole('kitchen', { top: 92, bottom: 92, height: 250, cup: 46, tone: 'silver', band: false }, { height: 400, pairs: 5 }, 'morning'),
+  'bottle-basil-roots-08': () => rootsScene({ seed: 'kitchen', vessel: BOTTLE, day: 8, gap: 1, count: 26, clump: 0.7, cmPerDay: 0.8, tone: [0.7, 0.012, 230], lastBirth: 14 }),
+  'bottle-basil-whole-20': basilWhole('kitchen', { top: 122, bottom: 122, height: 300, cup: 58, tone: 'silver', band: false }, { height: 500, pairs: 5 }, 'morning'),
 
   'aubergine-whole-10': aubergineWhole('morning', { height: 330, leaves: 8, size: 0.46 }),
   'aubergine-roots-14': () => rootsScene({ ...aubergine, day: 14, gap: 3.5, fuzz: 0.4 }),
@@ -72,7 +72,7 @@ export const pictures = {
   'aubergine-whole-30': aubergineWhole('evening', { height: 540, leaves: 13, flowers: [{ x: 0.1, y: 0.68, size: 0.062, ...MAUVE }, { x: -0.16, y: 0.8, size: 0.05, ...MAUVE, turn: 1 }], fruits: [{ x: -0.12, y: 0.55, ...YOUNG_AUBERGINE }] }),
   'aubergine-roots-31': () => rootsScene({ ...aubergine, day: 31, gap: 9.5, fuzz: 0.7, colour: 'tan', newColour: 'white', newShare: 0.75 }),
 
-  'lost-pepper-whole-14': () => wholeScene({ kind: 'pepper', seed: 'corner', light: 'noon', vessel: { tone: 'slate', height: 290 }, at: [480, 910], plant: { height: 330, leaves: 12, size: 0.36, droop: 1.5, yellow: 0.35 } }),
+  'lost-pepper-whole-14': () => wholeScene({ kind: 'pepper', seed: 'corner', light: 'noon', vessel: { tone: 'slate', height: 290 }, at: [480, 910], plant: { height: 330, leaves: 12, size: 0.36, droop: 1, yellow: 0.35 } }),
   'lost-pepper-roots-16': () => rootsScene({ seed: 'corner', vessel: SMALL_BUCKET, day: 12, gap: 1.5, count: 20, colour: 'brown', water: 'murky', bushy: 0.7, clump: 1.5 }),
 
   'second-lettuce-label': () => labelScene({ seed: 'second', lines: ['lettuce', 'day 0'], tone: 'terracotta', turn: 3 }),

@@ -24,8 +24,14 @@ export function rootSystem({ seed, day, count, cupRadius, floor, halfWidthAt, wa
   }).sort((a, b) => a.depth - b.depth)
 }
 
-/** Paints the system; `toPx` turns centimetres into a point of the picture. */
-export function paintRoots(system, { scale, toPx, colour, newColour = colour, newShare = 0, tint, clump = 1 }) {
+/** Paints the system, the far half out of focus; `toPx` turns centimetres into a point of the picture. */
+export function paintRoots(system, style, farFocus) {
+  const near = system.findIndex(({ depth }) => depth > 0.45)
+  const cut = near < 0 ? system.length : near
+  return [group({ filter: farFocus }, strands(system.slice(0, cut), style)), ...strands(system.slice(cut), style)]
+}
+
+function strands(system, { scale, toPx, colour, newColour = colour, newShare = 0, tint, clump = 1 }) {
   return system.map(({ main, sides, fine, fringe, depth }) => {
     const distance = (1 - depth) * 0.55
     const [shade, body, light] = colour.map(tone => blend(tone, tint, distance))

@@ -40,17 +40,18 @@ export function rootsScene({
   const { cup, foot } = netCup(sheet, { middle, seed, topY: lidY, bottomY: cupY, topHalf: rimHalf * scale, bottomHalf: vessel.cupBottomRadius * scale })
   const inside = sheet.clip(fill(`M${middle - wall.topHalf} 0H${middle + wall.topHalf}L${middle + basin.half} ${surfaceY}H${middle - basin.half}Z`, '#fff'))
   const drowned = sheet.clip(fill(body(basin), '#fff'))
+  const farFocus = blur(sheet, 1.5)
   const picture = group({},
     softTerrace(sheet, { seed, light, dim: 0.06 }),
     farWall(sheet, wall, { seed, tone }),
-    surfaceBehind(sheet, basin),
+    surfaceBehind(sheet, basin, tones),
     droplets(wall, { seed, fromY: 90, toY: surfaceY - 6, count: 170 }),
     waterBody(sheet, basin, tones),
     mirror(sheet, basin, system, [middle, cupY, scale]),
-    group({ 'clip-path': inside }, cup, paintRoots(system, paintWith([0.3, 0.03, 205], straightAhead)), foot),
-    group({ 'clip-path': drowned }, group({ filter: blur(sheet, 0.7) },
+    group({ 'clip-path': inside }, cup, paintRoots(system, paintWith([0.3, 0.03, 205], straightAhead), farFocus), foot),
+    group({ 'clip-path': drowned }, group({ filter: blur(sheet, 0.8) },
       soak > 0 ? group({ transform: `translate(${middle * -0.045 + 5} 0) scale(1.045 1)` }, cup) : '',
-      paintRoots(system, paintWith(tones[1], bentByWater)), soak > 0 ? foot : '')),
+      paintRoots(system, paintWith(tones[1], bentByWater), farFocus), soak > 0 ? foot : '')),
     waterInFront(sheet, basin, tones, { seed }),
     nearEdges(sheet, wall, tone),
     lid(sheet, wall, lidY, tone),

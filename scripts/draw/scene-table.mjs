@@ -46,7 +46,7 @@ export function labelScene({ seed, lines, tone = 'slate', ink = [0.28, 0.05, 260
       group({ filter: blur(sheet, 9) }, fill(tape, [0.1, 0.03, 220, 0.5], { transform: 'translate(8 14)' })),
       fill(tape, paper),
       fill(tape, [0.7, 0.05, 80], { filter: cloud(sheet, '0.09 0.012', 16, 2.4), opacity: 0.28 }),
-      lines.map((line, index) => written(line, { x: 345 + index * 60, y: 458 + index * 148, size: index === 0 ? 84 : 64, colour: ink, seed: `${seed}${index}` })),
+      lines.map((line, index) => written(line, { x: 420 + index * 30, y: 474 + index * 128, size: index === 0 ? 74 : 58, colour: ink, seed: `${seed}${index}` })),
       fill('M235 290L480 290L400 665L235 665Z', [1, 0.01, 90, 0.16])),
   )
   return finished(sheet, picture, { seed: 5, warmth: 0.18, light: [0.1, 0.05] })

@@ -10,9 +10,11 @@ import { LEAF_SHAPES, outline } from './leaf-outline.mjs'
  */
 export function smallLeaf({ kind, seed, from, angle, length, droop = 0.3, tilt = 0.2, colour, veinColour, yellow = 0, yellowColour = [0.83, 0.15, 106], gloss = 0.4, width = 1 }) {
   const random = makeRandom(seed, 'small')
-  const tip = away(from, angle, length)
+  // A leaf that hangs far down covers less ground: its length stays its length.
+  const reach = length * (1 - Math.max(0, droop - 0.5) * 0.5)
+  const tip = away(from, angle, reach)
   const sag = length * droop
-  const line = curve(from, away(from, angle, length * 0.36), [mid(from[0], tip[0], 0.72), mid(from[1], tip[1], 0.72) + sag * 0.12], [tip[0], tip[1] + sag], 18)
+  const line = curve(from, away(from, angle, reach * 0.36), [mid(from[0], tip[0], 0.72), mid(from[1], tip[1], 0.72) + sag * 0.12], [tip[0], tip[1] + sag], 18)
   const edges = outline(kind, seed, 26)
   const sides = [-1, 1].map((side, index) => {
     const narrow = width * (1 - Math.max(0, tilt * side) * 0.75)

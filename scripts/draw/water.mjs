@@ -1,9 +1,8 @@
 import { ellipse, fill, group, stroke } from './sheet.mjs'
 import { blur, brushed } from './filters.mjs'
+import { faded, lighter } from './colour.mjs'
 import { makeRandom } from './random.mjs'
 import { smooth } from './geometry.mjs'
-
-const SURFACE = [0.72, 0.06, 205]
 
 /** Tone of the solution, from clear to tea-coloured. */
 export const WATER_COLOURS = {
@@ -12,9 +11,9 @@ export const WATER_COLOURS = {
 }
 
 /** Half of the surface that lies behind the roots: darker, with a soft mirror of the wall. */
-export function surfaceBehind(sheet, { middle, y, half, lip }) {
+export function surfaceBehind(sheet, { middle, y, half, lip }, [[, chroma, hue]]) {
   const sheen = sheet.linear([middle - half, y], [middle + half, y], [
-    [0, [0.4, 0.06, 210, 0.9]], [0.32, [0.78, 0.05, 200, 0.9]], [0.6, [0.5, 0.06, 205, 0.9]], [1, [0.33, 0.05, 212, 0.9]],
+    [0, [0.4, chroma, hue, 0.9]], [0.32, [0.78, chroma * 0.8, hue, 0.9]], [0.6, [0.5, chroma, hue, 0.9]], [1, [0.33, chroma * 0.8, hue, 0.9]],
   ])
   return ellipse(middle, y, half, lip, sheen)
 }
@@ -33,6 +32,7 @@ export function body({ middle, y, half, floorY, floorHalf, lip }) {
 export function waterInFront(sheet, basin, tones, { seed, bubbles = 26 }) {
   const { middle, y, half, floorY, floorHalf, lip } = basin
   const random = makeRandom(seed, 'water')
+  const surface = lighter(tones[0], 0.22)
   const haze = sheet.linear([0, y], [0, floorY], [[0, [...tones[0], 0.1]], [0.5, [...tones[1], 0.3]], [1, [...tones[1], 0.62]]])
   const side = sheet.linear([middle - half, 0], [middle + half, 0], [[0, [0.1, 0.03, 220, 0.6]], [0.2, [0.1, 0.03, 220, 0]], [0.75, [0.1, 0.03, 220, 0]], [1, [0.1, 0.03, 220, 0.66]]])
   const inside = sheet.clip(fill(body(basin), '#fff'))
@@ -43,7 +43,7 @@ export function waterInFront(sheet, basin, tones, { seed, bubbles = 26 }) {
     fill(body(basin), side),
     Array.from({ length: bubbles }, () => bubble(random, middle + random.around(0, floorHalf * 0.85), random.between(y + lip, floorY - 8))),
     fill(`${front}A${half} ${lip} 0 0 0 ${middle - half} ${y}Z`, sheet.linear([middle - half, 0], [middle + half, 0], [
-      [0, [...SURFACE, 0.12]], [0.3, [0.92, 0.04, 195, 0.4]], [0.62, [...SURFACE, 0.16]], [1, [...SURFACE, 0.05]]])),
+      [0, faded(surface, 0.12)], [0.3, faded(lighter(surface, 0.2), 0.4)], [0.62, faded(surface, 0.16)], [1, faded(surface, 0.05)]])),
     ripples(basin, random),
     stroke(front, [0.94, 0.03, 195, 0.8], 2.4),
     stroke(`M${middle - half} ${y + 5}A${half} ${lip} 0 0 0 ${middle + half} ${y + 5}`, [0.2, 0.04, 215, 0.4], 4),

@@ -3,6 +3,8 @@
  */
 import { Refusal, explain, say } from './say.mjs'
 
+const PARENT_CHECK_MILLISECONDS = 1_000
+
 /** @typedef {() => unknown} Undo */
 
 /** @type {Undo[]} */
@@ -56,15 +58,29 @@ export async function leave(code) {
  * @param {number} exitCode
  */
 export function stopOnSignals(exitCode) {
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-    process.on(signal, () => {
-      if (isStopping()) return
-      say('\nStopping …')
-      void leave(exitCode).catch(() => process.exit(1))
-    })
+  const stop = () => {
+    if (isStopping()) return
+    say('\nStopping …')
+    void leave(exitCode).catch(() => process.exit(1))
   }
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, stop)
+  if (process.env.npm_lifecycle_event) whenParentEnds(stop)
   // With the terminal gone, a last word has nobody to go to and must not end the clean-up.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {})
+}
+
+/**
+ * A signal sent to npm ends the shell between npm and this process without reaching here.
+ * @param {() => void} stop
+ */
+function whenParentEnds(stop) {
+  const parent = process.ppid
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return
+    clearInterval(watch)
+    stop()
+  }, PARENT_CHECK_MILLISECONDS)
+  watch.unref()
 }
 
 /**

@@ -2,7 +2,11 @@ import { fileURLToPath } from 'node:url'
 import type { Rollup } from 'vite'
 import { PHOTO_WORKER_FILE } from '../photos/photo-worker-file'
 
-const [entry, logic] = ['photo-worker.ts', 'make-renditions.ts'].map(name => fileURLToPath(new URL(`../photos/${name}`, import.meta.url)))
+const [entry, logic] = [sourceOf('photo-worker.ts'), sourceOf('make-renditions.ts')]
+
+function sourceOf(name: string): string {
+  return fileURLToPath(new URL(`../photos/${name}`, import.meta.url))
+}
 
 /** Emits the photo worker as a file of its own beside the server, under a name by which the server finds it. */
 export function photoWorkerPlugin(): Rollup.Plugin {

@@ -28,7 +28,8 @@ export function openDatabase(url: string): Sequelize {
     timezone: '+00:00',
     isolationLevel: 'READ COMMITTED',
     define: { underscored: true, timestamps: false, freezeTableName: true },
-    dialectOptions: { connectTimeout: 5_000, bigIntAsNumber: true, insertIdAsNumber: true, checkDuplicate: false },
+    // JSON comes as text and is read by us: the driver's own reading cannot tell the text "12" from the number.
+    dialectOptions: { autoJsonMap: false, connectTimeout: 5_000, bigIntAsNumber: true, insertIdAsNumber: true, checkDuplicate: false },
     pool: { max: 12, min: 0, acquire: 10_000, idle: 30_000 },
   })
   return sequelize

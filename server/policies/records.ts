@@ -58,12 +58,25 @@ export function isVisibleInScope(
 ): boolean {
   const [kind, id] = scope.split(':')
   const { data } = record
-  if (kind === 'user') {
-    return [data.ownerId, data.accountId, data.authorId, data.byAccountId, plant?.data.ownerId].includes(id)
-  }
+  if (kind === 'user') return personsOf(record, plant).includes(id)
   if (record.type === 'club') return record.id === id
   if (record.type === 'membership') return data.clubId === id
   if (record.type === 'vessel') return vesselIsShared
   if (record.type === 'conflict' || record.type === 'notice') return false
   return sharedClubOf(plant) === id
+}
+
+/** Whose own record it is. */
+function personsOf({ type, data }: StoredRecord, plant: StoredRecord | null): unknown[] {
+  switch (type) {
+    case 'vessel':
+    case 'plant': return [data.ownerId]
+    case 'entry':
+    case 'photo': return [plant?.data.ownerId]
+    case 'comment': return [plant?.data.ownerId, data.authorId]
+    case 'conflict': return [data.ownerId, data.byAccountId]
+    case 'notice':
+    case 'membership': return [data.accountId]
+    case 'club': return []
+  }
 }

@@ -61,7 +61,7 @@ function decode(kind: FieldKind, value: unknown): unknown {
   if (value === null || value === undefined) return null
   if (kind === 'instant') return value instanceof Date ? value.toISOString() : value
   if (kind === 'boolean') return Boolean(value)
-  if (kind === 'json') return typeof value === 'string' ? JSON.parse(value) : value
+  if (kind === 'json') return JSON.parse(String(value))
   return value
 }
 

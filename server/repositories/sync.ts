@@ -92,7 +92,7 @@ export const mariadbSyncRepository: SyncRepository = {
   },
 
   async changesAfter(entityId, ver) {
-    const rows = await read<EntityChange & { fields: unknown, at: Date }>(
+    const rows = await read<Omit<EntityChange, 'fields' | 'at'> & { fields: string, at: Date }>(
       `SELECT entity_type AS entityType, entity_id AS entityId, ver, kind, account_id AS accountId,
         device_id AS deviceId, op_id AS opId, fields, at
        FROM entity_change WHERE entity_id = ? AND ver > ? ORDER BY ver`,
@@ -101,7 +101,7 @@ export const mariadbSyncRepository: SyncRepository = {
     return rows.map(row => ({
       ...row,
       at: row.at.toISOString(),
-      fields: typeof row.fields === 'string' ? JSON.parse(row.fields) : row.fields,
+      fields: JSON.parse(row.fields),
     }))
   },
 
@@ -159,11 +159,11 @@ async function withDisplayNames(memberships: StoredRecord[]): Promise<StoredReco
 }
 
 async function readReceipt(accountId: string, opId: string): Promise<Receipt> {
-  const [row] = await read<{ payloadSha256: string, result: string | StoredResult | null }>(
+  const [row] = await read<{ payloadSha256: string, result: string | null }>(
     'SELECT payload_sha256 AS payloadSha256, result FROM op_receipt WHERE account_id = ? AND op_id = ?', [accountId, opId],
   )
   if (!row) throw new TemporaryFailure('a receipt vanished while it was read')
-  return { payloadSha256: row.payloadSha256, result: typeof row.result === 'string' ? JSON.parse(row.result) : row.result }
+  return { payloadSha256: row.payloadSha256, result: row.result === null ? null : JSON.parse(row.result) }
 }
 
 async function write(sql: string, replacements: unknown[]): Promise<void> {

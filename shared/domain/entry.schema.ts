@@ -70,6 +70,25 @@ export const entryFieldsSchema = z.strictObject({
 })
 export type EntryFields = z.infer<typeof entryFieldsSchema>
 
+/** A visit about which nothing is said yet. */
+export const emptyEntryFields: Omit<EntryFields, 'plantId' | 'occurredAt' | 'recordedAt'> = {
+  lookedNoChange: false,
+  note: null,
+  ph: null,
+  ecMilliSiemensPerCm: null,
+  waterLevelCm: null,
+  airGapCm: null,
+  waterCelsius: null,
+  airCelsius: null,
+  relativeHumidityPercent: null,
+  actions: [],
+  topUpLitres: null,
+  topUpWith: null,
+  changeLitres: null,
+  harvestGrams: null,
+  harvestCount: null,
+}
+
 export const entryPatchSchema = z.partial(z.strictObject(changeableFields))
 
 /** An entry as everybody allowed to see it gets it. */

@@ -24,7 +24,7 @@ export async function createTestDatabase(): Promise<TestDatabase> {
   }
 }
 
-async function runOn(url: string, sql: string, values: unknown[] = []): Promise<unknown> {
+export async function runOn(url: string, sql: string, values: unknown[] = []): Promise<unknown> {
   const { hostname, port, username, password, pathname } = new URL(url)
   const connection = await createConnection({
     host: hostname,

@@ -16,6 +16,8 @@ export const keys = {
   /** A smaller copy of somebody's photo, kept to be seen without signal. */
   picture: (photoId: string) => `picture/${photoId}`,
   draft: (plantId: string) => `draft/${plantId}`,
+  /** Bytes of a photo that waits in a draft, apart from it so that a letter typed does not write a photo again. */
+  draftPhoto: (draftId: string, photoKey: string) => `draft-photo/${draftId}/${photoKey}`,
 }
 
 export const prefixes = {
@@ -27,4 +29,5 @@ export const prefixes = {
   cursor: 'cursor/',
   upload: 'upload/',
   picture: 'picture/',
+  draftPhotosOf: (draftId: string) => `draft-photo/${draftId}/`,
 }

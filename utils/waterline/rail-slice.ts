@@ -69,7 +69,7 @@ export function yAt(frame: SliceFrame, day: number): number {
 }
 
 function inFrame(day: number, frame: SliceFrame): boolean {
-  return day > frame.fromDay - 1e-9 && day <= frame.toDay
+  return day >= frame.fromDay && day < frame.toDay
 }
 
 function surfacePoints(piece: Piece, frame: SliceFrame): Point[] {

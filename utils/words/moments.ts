@@ -9,8 +9,13 @@ export function dayAndTime(iso: string, options: { timeZone?: string, now?: Date
   const { timeZone, locale, now } = options
   const otherYear = now !== undefined && yearIn(date, timeZone) !== yearIn(now, timeZone)
   return new Intl.DateTimeFormat(locale, {
-    day: 'numeric', month: 'long', hour: 'numeric', minute: '2-digit', timeZone, ...(otherYear ? { year: 'numeric' } : {}),
+    day: 'numeric', month: 'long', hour: hourForm(locale), minute: '2-digit', timeZone, ...(otherYear ? { year: 'numeric' } : {}),
   }).format(date)
+}
+
+/** "07:40" where the day has 24 hours, "7:40 AM" where it has twice twelve. */
+function hourForm(locale?: string): 'numeric' | '2-digit' {
+  return new Intl.DateTimeFormat(locale, { hour: 'numeric' }).resolvedOptions().hour12 ? 'numeric' : '2-digit'
 }
 
 function yearIn(date: Date, timeZone?: string): string {
@@ -21,6 +26,11 @@ function yearIn(date: Date, timeZone?: string): string {
 export function calendarDay(day: string, locale?: string): string {
   return new Intl.DateTimeFormat(locale, { day: 'numeric', month: 'long', year: 'numeric', timeZone: 'UTC' })
     .format(new Date(`${day}T00:00:00.000Z`))
+}
+
+/** "Tuesday 9 June" in the reader's own zone and order. */
+export function weekdayAndDay(date: Date, locale?: string): string {
+  return new Intl.DateTimeFormat(locale, { weekday: 'long', day: 'numeric', month: 'long' }).format(date)
 }
 
 /** "today", "yesterday", "4 days ago", "in 2 days". */

@@ -31,16 +31,15 @@ export function readingText(field: ReadingField, value: number, locale?: string)
   return READING_WORDS[field].short(readingNumber(field, value, locale))
 }
 
-/** What a verdict is called, in a word, a colour and a mark. */
-export function verdictWords(verdict: Verdict): { text: string, tone: Tone, icon: string } {
-  if (verdict.side === 'in') return { text: 'in range', tone: 'leaf', icon: 'lucide:check' }
+/** What a verdict is called, in a word and a colour. */
+export function verdictWords(verdict: Verdict): { text: string, tone: Tone } {
+  if (verdict.side === 'in') return { text: 'in range', tone: 'leaf' }
   const below = verdict.side === 'below'
-  const icon = below ? 'lucide:arrow-down' : 'lucide:arrow-up'
-  if (verdict.far) return { text: below ? 'far too low' : 'far too high', tone: 'chilli', icon }
-  return { text: below ? 'below' : 'above', tone: 'amber', icon }
+  if (verdict.far) return { text: below ? 'far too low' : 'far too high', tone: 'chilli' }
+  return { text: below ? 'below' : 'above', tone: 'amber' }
 }
 
-export type ReadingItem = { field: ReadingField, text: string, tone: Tone, icon: string | undefined, state: string }
+export type ReadingItem = { field: ReadingField, text: string, tone: Tone, side: Verdict['side'] | undefined, state: string }
 
 /** The readings of a visit in their usual order, missing ones left out. */
 export function readingItems(readings: Partial<Readings>, verdicts: Verdicts = {}, locale?: string): ReadingItem[] {
@@ -49,8 +48,8 @@ export function readingItems(readings: Partial<Readings>, verdicts: Verdicts = {
     if (value === null || value === undefined) return []
     const verdict = verdicts[field]
     const text = readingText(field, value, locale)
-    if (!verdict) return [{ field, text, tone: field === 'waterLevelCm' || field === 'airGapCm' ? 'water' : 'plain', icon: undefined, state: '' }]
+    if (!verdict) return [{ field, text, tone: field === 'waterLevelCm' || field === 'airGapCm' ? 'water' : 'plain', side: undefined, state: '' }]
     const words = verdictWords(verdict)
-    return [{ field, text, tone: words.tone, icon: words.icon, state: words.text }]
+    return [{ field, text, tone: words.tone, side: verdict.side, state: words.text }]
   })
 }

@@ -16,7 +16,7 @@ function plainDigits(text: string): string {
  * them into a reading, and "1,234" as 1.234 is caught by the field's range.
  */
 export function readTypedNumber(typed: string): number | null | 'unreadable' {
-  const text = plainDigits(typed.normalize('NFKC')).replace(/\s/g, '').replace(/[\u2212\u2013]/g, '-').replace(/[,\u066B]/g, '.')
+  const text = plainDigits(typed.normalize('NFKC')).replace(/[\s\u200E\u200F\u061C]/g, '').replace(/[\u2212\u2013]/g, '-').replace(/[,\u066B]/g, '.')
   if (text === '') return null
   if (!/^[+-]?(\d+\.?\d*|\.\d+)$/.test(text)) return 'unreadable'
   return Number(text)

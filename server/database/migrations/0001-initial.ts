@@ -141,7 +141,7 @@ const tables: [name: string, columns: string][] = [
     entity_id UUID NOT NULL,
     plant_id UUID NULL,
     field VARCHAR(40) NOT NULL,
-    other_value JSON NOT NULL,
+    other_value JSON NULL,
     owner_id UUID NOT NULL,
     by_account_id UUID NOT NULL,
     device_id UUID NOT NULL,
