@@ -70,7 +70,7 @@ export default defineNuxtConfig({
     provider: 'server',
     fallbackToApi: false,
     serverBundle: { collections: ['lucide'] },
-    clientBundle: { scan: true, sizeLimitKb: 64 },
+    clientBundle: { scan: { globInclude: ['**/*.{vue,ts}'], globExclude: ['node_modules', 'dist', 'build', 'coverage', 'test', 'tests', '.*'] }, sizeLimitKb: 64 },
   },
   tailwindcss: { cssPath: false, exposeConfig: false, viewer: false },
   pwa: {

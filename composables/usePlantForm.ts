@@ -19,8 +19,14 @@ export function usePlantForm(start?: PlantForm, rest?: Rest) {
   const message = ref<string | null>(null)
   const busy = ref(false)
   const unreadable = ref<string[]>([])
+  const askedForVessel = ref(false)
 
-  const errors = computed(() => errorsByField(issues.value, PLANT_FORM_NAMES))
+  /** An error leaves its field once it is put right; the list at the top stays until the next try. */
+  const errors = computed(() => {
+    if (issues.value.length === 0) return {}
+    const open = new Set(problems(askedForVessel.value).issues.map(issue => issue.path))
+    return errorsByField(issues.value.filter(issue => open.has(issue.path)), PLANT_FORM_NAMES)
+  })
   const summary = computed(() => summaryOf(issues.value, PLANT_FORM_NAMES))
   const suggestedName = computed(() => {
     const { kind } = form.value.vessel
@@ -31,18 +37,22 @@ export function usePlantForm(start?: PlantForm, rest?: Rest) {
     unreadable.value = is ? [...new Set([...unreadable.value, path])] : unreadable.value.filter(other => other !== path)
   }
 
+  function problems(withVessel: boolean) {
+    const checked = checkPlantForm(form.value, rest ?? { timeZone, endedOn: null, endReason: null }, suggestedName.value, withVessel)
+    const typed = unreadable.value.map(path => ({ path, message: 'is not a number' }))
+    return { checked, issues: checked.ok ? typed : [...typed, ...checked.issues] }
+  }
+
   /** Checks the form and saves it; null while something in it needs another look. */
   async function submit(
     withVessel: boolean, store: (checked: Extract<CheckedPlantForm, { ok: true }>) => Promise<SaveOutcome>,
   ): Promise<string | null> {
     if (busy.value) return null
     message.value = null
-    const checked = checkPlantForm(form.value, rest ?? { timeZone, endedOn: null, endReason: null }, suggestedName.value, withVessel)
-    issues.value = [
-      ...unreadable.value.map(path => ({ path, message: 'is not a number' })),
-      ...(checked.ok ? [] : checked.issues),
-    ]
-    if (!checked.ok || issues.value.length > 0) return null
+    askedForVessel.value = withVessel
+    const { checked, issues: found } = problems(withVessel)
+    issues.value = found
+    if (!checked.ok || found.length > 0) return null
     busy.value = true
     const outcome = await store(checked)
     busy.value = false

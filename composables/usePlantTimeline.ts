@@ -6,6 +6,7 @@ import { usePlantsStore } from '~/stores/plants'
 import { plantSubtitle, vesselNoun } from '~/utils/plant/plant-words'
 import { dayOf, dayPosition, groupByDay, latestLevel, latestReadings, railOf, refillLimitOf } from '~/utils/plant/timeline'
 import { gapOf, litresIn } from '~/utils/plant/vessel-water'
+import { drinksPerDay } from '~/utils/plant/drinking'
 import { verdictsOf } from '~/utils/plant/verdicts'
 import { END_REASON_WORDS } from '~/utils/words/names'
 
@@ -55,10 +56,11 @@ export function usePlantTimeline(plantId: () => string, now: Readonly<Ref<Date>>
   const levelCm = computed(() => level.value?.levelCm ?? null)
   const levelDay = computed(() => (plant.value && level.value ? dayOf(plant.value.data, level.value.entry.data.occurredAt) : null))
   const litres = computed(() => litresIn(vessel.value, levelCm.value))
+  const litresPerDay = computed(() => drinksPerDay(entries.value, vessel.value))
   const gapCm = computed(() => gapOf({ waterLevelCm: levelCm.value }, vessel.value))
 
   return {
     plant, mine, vessel, vesselName: computed(() => vesselNoun(vessel.value)), entries, subtitle, grower, visibility, ended: endedWords,
-    day, untilDay, days, rail, limitCm, headReadings, verdicts, levelCm, levelDay, litres, gapCm,
+    day, untilDay, days, rail, limitCm, headReadings, verdicts, levelCm, levelDay, litres, gapCm, litresPerDay,
   }
 }

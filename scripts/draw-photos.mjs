@@ -1,10 +1,10 @@
 /**
  * Draws the demo's photos. For developers only: the pictures are committed, nobody needs this to run the project.
  *
- *   node scripts/draw-photos.mjs             all pictures
- *   node scripts/draw-photos.mjs tomato-roots  those whose name starts so
+ *   node scripts/draw-photos.mjs                all pictures
+ *   node scripts/draw-photos.mjs tomato-roots   those whose name starts so
  *
- * Needs a Chromium; say where it is with CHROME_PATH.
+ * Needs a Chromium; say where it is with STILLROOT_CHROMIUM.
  */
 import { mkdir, writeFile } from 'node:fs/promises'
 import { fileURLToPath } from 'node:url'
@@ -29,7 +29,7 @@ async function smallEnough() {
 
 await mkdir(folder, { recursive: true })
 const browser = await chromium.launch({
-  executablePath: process.env.CHROME_PATH ?? '/usr/bin/chromium',
+  executablePath: process.env.STILLROOT_CHROMIUM ?? '/usr/bin/chromium',
   args: ['--headless=new', '--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking', '--disable-component-update', '--disable-sync'],
 })
 const page = await browser.newPage()

@@ -24,6 +24,8 @@ export const useCommentsStore = defineStore('comments', () => {
 
   const ofEntry = (entryId: string): View<Comment>[] => byEntry.value.get(entryId) ?? []
 
+  const byId = (id: string): View<Comment> | null => journal.shelves.comment.get(id) ?? null
+
   const add = (plantId: string, entryId: string, text: string): Promise<SaveOutcome> => save([{
     kind: 'create',
     entityType: 'comment',
@@ -32,5 +34,5 @@ export const useCommentsStore = defineStore('comments', () => {
   }])
   const remove = (id: string): Promise<SaveOutcome> => save([{ kind: 'delete', entityType: 'comment', entityId: id, fields: {} }])
 
-  return { ofEntry, add, remove }
+  return { ofEntry, byId, add, remove }
 })

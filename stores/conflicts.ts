@@ -1,4 +1,5 @@
 import { defineStore } from 'pinia'
+import { computed } from 'vue'
 import { useSave } from '~/composables/useSave'
 import type { Conflict } from '#shared/domain/conflict.schema'
 import type { SaveOutcome, View } from '~/types/view'
@@ -9,12 +10,15 @@ export const useConflictsStore = defineStore('conflicts', () => {
   const journal = useJournalStore()
   const { save } = useSave()
 
-  const openOf = (entityId: string): View<Conflict>[] => [...journal.shelves.conflict.values()]
-    .filter(conflict => conflict.data.entityId === entityId && conflict.data.resolvedAt === null)
+  const open = computed(() => [...journal.shelves.conflict.values()]
+    .filter(conflict => conflict.data.resolvedAt === null)
+    .sort((left, right) => right.data.at.localeCompare(left.data.at)))
+  const openOf = (entityId: string): View<Conflict>[] => open.value
+    .filter(conflict => conflict.data.entityId === entityId)
 
   const choose = (id: string, choice: 'standing' | 'other'): Promise<SaveOutcome> => (
     save([{ kind: 'resolve', entityType: 'conflict', entityId: id, fields: { choice } }])
   )
 
-  return { openOf, choose }
+  return { open, openOf, choose }
 })

@@ -6,7 +6,7 @@ import type { RecordOf } from '#shared/domain/records'
 import type { AttentionItem, OutboxItem } from '#shared/sync/outbox'
 import type { RecordType } from '#shared/sync/protocol'
 import type { View } from '~/types/view'
-import { createJournalMirror } from '~/utils/offline/journal-mirror'
+import { createJournalMirror, isMirrored } from '~/utils/offline/journal-mirror'
 import type { ChangedRecord, JournalMirror } from '~/utils/offline/journal-mirror'
 import { openPhone } from '~/utils/offline/phone'
 import type { Phone } from '~/utils/offline/phone'
@@ -59,6 +59,7 @@ export const useJournalStore = defineStore('journal', () => {
 
   /** Takes up what changed in the store, in order. Resolves when screens can see it. */
   function refresh(changedKeys: string[]): Promise<void> {
+    if (!changedKeys.some(isMirrored)) return refreshing
     refreshing = refreshing.then(async () => {
       const current = phone.value
       if (current && mirror) show(await mirror.refresh(current.storage, changedKeys))

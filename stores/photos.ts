@@ -21,6 +21,7 @@ export const usePhotosStore = defineStore('photos', () => {
     return groups
   })
   const ofEntry = (entryId: string): View<Photo>[] => byEntry.value.get(entryId) ?? []
+  const byId = (id: string): View<Photo> | null => journal.shelves.photo.get(id) ?? null
   /** True while the picture itself waits on this phone. */
   const isUploading = (photoId: string): boolean => journal.waiting.uploads.some(item => item.photoId === photoId)
 
@@ -29,5 +30,5 @@ export const usePhotosStore = defineStore('photos', () => {
   )
   const remove = (id: string): Promise<SaveOutcome> => save([{ kind: 'delete', entityType: 'photo', entityId: id, fields: {} }])
 
-  return { ofEntry, isUploading, changeSubject, remove }
+  return { ofEntry, byId, isUploading, changeSubject, remove }
 })

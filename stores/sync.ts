@@ -2,7 +2,11 @@ import { defineStore } from 'pinia'
 import { computed } from 'vue'
 import type { Op } from '#shared/sync/protocol'
 import { sendable } from '#shared/sync/outbox'
-import { discardRefused, sendAgain } from '~/utils/offline/journal'
+import { countDrafts, readUnsent } from '~/utils/offline/export-unsent'
+import type { UnsentExport } from '~/utils/offline/export-unsent'
+import { dropPhoto, sendPhotoAgain } from '~/utils/offline/failed-photos'
+import { discardRefused, isoOf, sendAgain } from '~/utils/offline/journal'
+import type { UploadItem } from '~/utils/offline/stored-shapes'
 import { useJournalStore } from './journal'
 import { useSessionStore } from './session'
 
@@ -42,5 +46,20 @@ export const useSyncStore = defineStore('sync', () => {
     if (journal.phone) await discardRefused(journal.phone.storage, opId)
   }
 
-  return { attention, failedPhotos, waitingPhotos, waitingChanges, held, unsent, needsAttention, reason, kick, tryAgain, discard }
+  async function tryPhotoAgain(item: UploadItem): Promise<void> {
+    if (journal.phone) await sendPhotoAgain(journal.phone.storage, item)
+    kick()
+  }
+
+  async function discardPhoto(item: UploadItem): Promise<void> {
+    if (journal.phone) await dropPhoto(journal.phone.storage, item)
+  }
+
+  /** Everything that is on this phone only, for a file of the person's own. */
+  const exportUnsent = async (): Promise<UnsentExport | null> => (
+    journal.phone ? readUnsent(journal.phone.storage, isoOf(journal.phone.around.now())) : null
+  )
+  const drafts = async (): Promise<number> => (journal.phone ? countDrafts(journal.phone.storage) : 0)
+
+  return { tryPhotoAgain, discardPhoto, exportUnsent, drafts, attention, failedPhotos, waitingPhotos, waitingChanges, held, unsent, needsAttention, reason, kick, tryAgain, discard }
 })

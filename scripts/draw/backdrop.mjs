@@ -53,7 +53,9 @@ function farRoofs(random, tones, width, wallY) {
     const x = index * width / 9 - 110
     const tone = vary(random, blend([0.7, 0.06, 48], tones.low, 0.4), 1.6)
     const stack = random.chance(0.6) ? rectangle(x + wide * random.between(0.2, 0.7), wallY - tall - 34, 22, 50, lighter(tone, -0.08)) : ''
-    const windows = Array.from({ length: 3 }, (__, spot) => rectangle(x + 20 + spot * wide / 3.4, wallY - tall + 26, 18, 26, lighter(tone, -0.16), { opacity: 0.6 }))
+    const windows = Array.from(
+      { length: 3 }, (__, spot) => rectangle(x + 20 + spot * wide / 3.4, wallY - tall + 26, 18, 26, lighter(tone, -0.16), { opacity: 0.6 }),
+    )
     return group({}, stack, rectangle(x, wallY - tall, wide, tall + 40, tone), rectangle(x, wallY - tall, wide, 12, lighter(tone, 0.08)), windows)
   })
 }
@@ -66,9 +68,14 @@ function pottedRow(random, tones, width, wallY, floorY) {
     const clay = vary(random, random.chance(0.65) ? [0.62, 0.11, 45] : [0.4, 0.04, 210], 1)
     const crown = Array.from({ length: 20 }, () => {
       const tone = vary(random, blend([0.58, 0.13, 135], tones.glow, 0.12), 2.4)
-      return ellipse(x + random.around(0, size * 1.5), y - size * 1.5 - random.between(0, 1) ** 1.4 * (floorY - wallY) * 0.5, size * random.between(0.2, 0.55), size * random.between(0.2, 0.5), tone)
+      return ellipse(
+        x + random.around(0, size * 1.5), y - size * 1.5 - random.between(0, 1) ** 1.4 * (floorY - wallY) * 0.5,
+        size * random.between(0.2, 0.55), size * random.between(0.2, 0.5), tone,
+      )
     })
     return group({ opacity: 0.92 }, ellipse(x + size * 0.4, y, size * 1.3, size * 0.24, [0.2, 0.04, 50, 0.4]), crown,
-      fill(`M${x - size} ${y - size * 1.4}h${size * 2}l${-size * 0.3} ${size * 1.4}h${-size * 1.4}Z`, clay), rectangle(x - size * 1.1, y - size * 1.5, size * 2.2, size * 0.34, lighter(clay, 0.07)))
+      fill(
+        `M${x - size} ${y - size * 1.4}h${size * 2}l${-size * 0.3} ${size * 1.4}h${-size * 1.4}Z`, clay,
+      ), rectangle(x - size * 1.1, y - size * 1.5, size * 2.2, size * 0.34, lighter(clay, 0.07)))
   })
 }

@@ -20,7 +20,13 @@ export function farWall(sheet, wall, { seed, tone = [0.36, 0.035, 205] }) {
     fill(shape, round),
     fill(shape, [0.9, 0.02, 200, 0.1], { filter: cloud(sheet, '0.012 0.004', 5, 2) }),
     fill(shape, shade),
-    group({ filter: blur(sheet, 30) }, fill(`M${middle - topHalf * 0.7} ${topY}L${middle - topHalf * 0.3} ${topY}L${middle + topHalf * 0.1} ${floorY}L${middle - topHalf * 0.5} ${floorY}Z`, [0.95, 0.03, 95, 0.12])),
+    group(
+      { filter: blur(sheet, 30) },
+      fill(
+        `M${middle - topHalf * 0.7} ${topY}L${middle - topHalf * 0.3} ${topY}L${middle + topHalf * 0.1} ${floorY}L${middle - topHalf * 0.5} ${floorY}Z`,
+        [0.95, 0.03, 95, 0.12],
+      ),
+    ),
     ellipse(middle, floorY, floorHalf, lip, [l * 0.5, c, h]),
     rings(wall, seed),
   )
@@ -31,7 +37,10 @@ function rings({ middle, topHalf, topY, floorY, lip }, seed) {
   const random = makeRandom(seed, 'rings')
   return Array.from({ length: 4 }, () => {
     const y = random.between(topY + 60, floorY - 80)
-    return stroke(`M${middle - topHalf} ${y - lip * 0.3}A${topHalf} ${lip} 0 0 1 ${middle + topHalf} ${y - lip * 0.3}`, [0.85, 0.02, 90, 0.07], random.between(2, 5))
+    return stroke(
+      `M${middle - topHalf} ${y - lip * 0.3}A${topHalf} ${lip} 0 0 1 ${middle + topHalf} ${y - lip * 0.3}`, [0.85, 0.02, 90, 0.07],
+      random.between(2, 5),
+    )
   })
 }
 
@@ -59,8 +68,14 @@ export function nearEdges(sheet, { middle, topY, topHalf, floorY, floorHalf, lip
   const [l, c, h] = tone
   const thick = 15
   const edge = (side) => {
-    const paint = sheet.linear([middle + side * topHalf, 0], [middle + side * (topHalf + thick), 0], [[0, [l * 0.55, c, h]], [0.5, [l * 1.25, c, h]], [1, [l * 0.8, c, h]]])
-    return fill(`M${middle + side * topHalf} ${topY}h${side * thick}L${middle + side * (floorHalf + thick)} ${floorY + 6}Q${middle + side * floorHalf} ${floorY + 30} ${middle} ${floorY + lip + 14}L${middle} ${floorY + lip}A${floorHalf} ${lip} 0 0 ${side > 0 ? 0 : 1} ${middle + side * floorHalf} ${floorY}Z`, paint)
+    const paint = sheet.linear(
+      [middle + side * topHalf, 0], [middle + side * (topHalf + thick), 0],
+      [[0, [l * 0.55, c, h]], [0.5, [l * 1.25, c, h]], [1, [l * 0.8, c, h]]],
+    )
+    return fill(
+      `M${middle + side * topHalf} ${topY}h${side * thick}L${middle + side * (floorHalf + thick)} ${floorY + 6}Q${middle + side * floorHalf} ${floorY + 30} ${middle} ${floorY + lip + 14}L${middle} ${floorY + lip}A${floorHalf} ${lip} 0 0 ${side > 0 ? 0 : 1} ${middle + side * floorHalf} ${floorY}Z`,
+      paint,
+    )
   }
   return group({}, edge(-1), edge(1))
 }
@@ -104,7 +119,10 @@ export function netCup(sheet, { middle, topY, bottomY, topHalf, bottomHalf, seed
     return stroke(`M${middle - half} ${y}Q${middle} ${y + 18} ${middle + half} ${y}`, plastic, 13)
       + stroke(`M${middle - half} ${y - 4}Q${middle} ${y + 14} ${middle + half} ${y - 4}`, [0.52, 0.02, 215, 0.4], 2)
   })
-  const round = sheet.linear([middle - topHalf, 0], [middle + topHalf, 0], [[0, [0.08, 0.02, 220, 0.75]], [0.3, [0.08, 0.02, 220, 0]], [0.65, [0.08, 0.02, 220, 0.12]], [1, [0.08, 0.02, 220, 0.8]]])
+  const round = sheet.linear(
+    [middle - topHalf, 0], [middle + topHalf, 0],
+    [[0, [0.08, 0.02, 220, 0.75]], [0.3, [0.08, 0.02, 220, 0]], [0.65, [0.08, 0.02, 220, 0.12]], [1, [0.08, 0.02, 220, 0.8]]],
+  )
   return {
     cup: group({ 'clip-path': inside }, fill(outline, [0.16, 0.03, 45]), pebbles, ribs, bands, fill(outline, round)),
     foot: group({ 'clip-path': inside }, bands.at(-1), ribs.map(rib => group({ 'clip-path': footClip }, rib))),

@@ -1,4 +1,4 @@
-import { el, ellipse, fill, group, path, stroke } from './sheet.mjs'
+import { ellipse, fill, group, path, stroke } from './sheet.mjs'
 import { blur, cloud, relief } from './filters.mjs'
 import { blend, faded, lighter } from './colour.mjs'
 import { along, at, headingAt, ribbon, smooth } from './geometry.mjs'
@@ -30,13 +30,22 @@ export function closeLeaf(sheet, { kind, seed, bend, length, green, between, vei
   const net = network(seed, [...veins, ...cross, bend], cross, [...left.map(place), ...right.slice().reverse().map(place)])
   const veinTone = blend(veinColour, lighter(veinColour, 0.02), yellow)
   const greenHalo = blend(green, lighter(green, 0.04), 0.5)
-  const glow = sheet.linear(place([0.5, -0.4]), place([0.5, 0.4]), [[0, faded(lighter(blade, 0.12), 0.75)], [0.48, faded(lighter(blade, 0.02), 0)], [0.52, faded(lighter(blade, -0.16), 0.62)], [1, faded(lighter(blade, 0.05), 0.3)]])
+  const glow = sheet.linear(
+    place([0.5, -0.4]), place([0.5, 0.4]),
+    [
+      [0, faded(lighter(blade, 0.12), 0.75)], [0.48, faded(lighter(blade, 0.02), 0)], [0.52, faded(lighter(blade, -0.16), 0.62)],
+      [1, faded(lighter(blade, 0.05), 0.3)],
+    ],
+  )
   return group({},
     group({ filter: blur(sheet, 22), opacity: 0.55, transform: 'translate(26 38)' }, fill(whole, [0.12, 0.04, 160])),
     group({ 'clip-path': shape },
       fill(whole, blade),
       fill(whole, lighter(blade, -0.1), { filter: cloud(sheet, 0.012, 7, 2.6), opacity: 0.6 }),
-      yellow > 0 ? group({ filter: blur(sheet, 9) }, veins.map(line => stroke(smooth(line), greenHalo, 30 * (1.15 - yellow * 0.5))), stroke(smooth(bend), greenHalo, 46)) : '',
+      yellow > 0 ? group(
+        { filter: blur(sheet, 9) }, veins.map(line => stroke(smooth(line), greenHalo, 30 * (1.15 - yellow * 0.5))),
+        stroke(smooth(bend), greenHalo, 46),
+      ) : '',
       yellow > 0 ? group({ filter: blur(sheet, 2.5), opacity: 0.75 }, net.map(piece => stroke(piece.d, greenHalo, piece.width * 3.2))) : '',
       quilt(sheet, veins, net),
       fill(whole, glow),
@@ -67,7 +76,10 @@ function network(seed, lines, cross, edgePoints) {
     const list = node.weight > 14 ? thick : node.weight > 4 ? middling : thin
     list.push(`M${at(node.parent.point)}L${at(node.point)}`)
   }
-  return [{ d: thin.join(''), width: 0.9 }, { d: middling.join(''), width: 1.5 }, { d: thick.join(''), width: 2.2 }, { d: cross.map(line => smooth(line)).join(''), width: 2.8 }]
+  return [
+    { d: thin.join(''), width: 0.9 }, { d: middling.join(''), width: 1.5 }, { d: thick.join(''), width: 2.2 },
+    { d: cross.map(line => smooth(line)).join(''), width: 2.8 },
+  ]
 }
 
 function thicken(line) {
@@ -87,8 +99,14 @@ function contains(polygon, [x, y]) {
 
 /** The blade swells between its veins: the veins are the valleys of a lit relief. */
 function quilt(sheet, veins, net) {
-  const broad = group({ filter: relief(sheet, 13, -24), style: 'mix-blend-mode:soft-light', opacity: 0.6 }, veins.map(line => stroke(smooth(line), '#000', 15)), path('M-400 -400h1v1h-1ZM1800 1500h1v1h-1Z', { fill: '#000' }))
-  const fine = group({ filter: relief(sheet, 2.2, -4), style: 'mix-blend-mode:soft-light', opacity: 0.55 }, net.map(piece => stroke(piece.d, '#000', piece.width * 1.6)), path('M-400 -400h1v1h-1ZM1800 1500h1v1h-1Z', { fill: '#000' }))
+  const broad = group(
+    { filter: relief(sheet, 13, -24), style: 'mix-blend-mode:soft-light', opacity: 0.6 },
+    veins.map(line => stroke(smooth(line), '#000', 15)), path('M-400 -400h1v1h-1ZM1800 1500h1v1h-1Z', { fill: '#000' }),
+  )
+  const fine = group(
+    { filter: relief(sheet, 2.2, -4), style: 'mix-blend-mode:soft-light', opacity: 0.55 },
+    net.map(piece => stroke(piece.d, '#000', piece.width * 1.6)), path('M-400 -400h1v1h-1ZM1800 1500h1v1h-1Z', { fill: '#000' }),
+  )
   return [broad, fine]
 }
 
@@ -115,7 +133,10 @@ function shine(sheet, { place, gloss, seed }) {
 }
 
 function rim(sheet, halves, blade) {
-  return group({ filter: blur(sheet, 7) }, stroke(halves[0], lighter(blade, 0.2), 9, { opacity: 0.5 }), stroke(halves[1], [0.15, 0.05, 150], 16, { opacity: 0.35 }))
+  return group(
+    { filter: blur(sheet, 7) }, stroke(halves[0], lighter(blade, 0.2), 9, { opacity: 0.5 }),
+    stroke(halves[1], [0.15, 0.05, 150], 16, { opacity: 0.35 }),
+  )
 }
 
 function dewDrops(seed, place, count) {

@@ -18,7 +18,10 @@ export const LEAF_SHAPES = {
   basil: { width: 0.31, veins: 7, arch: 0.3, edge: share => bulge(share, 0.4, 0.7, 1.25), teeth: 0.006, toothCount: 24 },
   pepper: { width: 0.25, veins: 7, arch: 0.35, edge: share => bulge(share, 0.38, 0.95, 1.45), teeth: 0, toothCount: 10 },
   aubergine: { width: 0.36, veins: 6, arch: 0.2, edge: share => bulge(share, 0.36, 0.6, 1.1) * (0.93 + 0.12 * Math.cos(share * 19)), teeth: 0, toothCount: 8 },
-  tomato: { width: 0.31, veins: 7, arch: 0.3, edge: share => bulge(share, 0.3, 0.75, 1.2) * (0.76 + 0.28 * lobes(share + 0.06, 4.6)), teeth: 0.014, toothCount: 16 },
+  tomato: {
+    width: 0.31, veins: 7, arch: 0.3, edge: share => bulge(share, 0.3, 0.75, 1.2) * (0.76 + 0.28 * lobes(share + 0.06, 4.6)), teeth: 0.014,
+    toothCount: 16,
+  },
 }
 
 /** Both edges from stalk to tip as [u, v]: u along the midrib, v across it (negative is left). */

@@ -7,7 +7,10 @@ import { makeRandom } from './random.mjs'
 /** A loose lettuce seen from above at a slant: ruffled leaves from the outside in. */
 export function lettucePlant(sheet, { seed, centre, radius, leaves, colour = [0.7, 0.155, 126], squash = 0.72, blush = 0 }) {
   const random = makeRandom(seed, 'lettuce')
-  const shade = ellipse(centre[0] + radius * 0.06, centre[1] + radius * 0.09, radius * 0.9, radius * squash * 0.9, [0.1, 0.04, 160, 0.55], { filter: blur(sheet, radius * 0.08) })
+  const shade = ellipse(
+    centre[0] + radius * 0.06, centre[1] + radius * 0.09, radius * 0.9, radius * squash * 0.9, [0.1, 0.04, 160, 0.55],
+    { filter: blur(sheet, radius * 0.08) },
+  )
   const turnAtStart = random.between(0, 6)
   const layers = Array.from({ length: leaves }, (_, index) => {
     const ring = 1 - index / leaves
@@ -25,7 +28,11 @@ function crinkled(sheet, radius) {
   return sheet.filter([
     el('feTurbulence', { type: 'fractalNoise', baseFrequency: size, numOctaves: 2, seed: Math.round(radius), result: 'bumps' }),
     el('feColorMatrix', { in: 'bumps', type: 'matrix', values: '0 0 0 0 0  0 0 0 0 0  0 0 0 0 0  1.4 0.4 0 0 -0.4', result: 'height' }),
-    el('feDiffuseLighting', { 'in': 'height', 'surfaceScale': radius * 0.085, 'diffuseConstant': 1.02, 'lighting-color': '#fff', 'result': 'lit' }, el('feDistantLight', { azimuth: 225, elevation: 52 })),
+    el(
+      'feDiffuseLighting',
+      { 'in': 'height', 'surfaceScale': radius * 0.06, 'diffuseConstant': 1.02, 'lighting-color': '#fff', 'result': 'lit' },
+      el('feDistantLight', { azimuth: 225, elevation: 52 }),
+    ),
     el('feBlend', { in: 'lit', in2: 'SourceGraphic', mode: 'soft-light', result: 'mixed' }),
     el('feComposite', { in: 'mixed', in2: 'SourceGraphic', operator: 'in' }),
   ])
@@ -53,7 +60,9 @@ function ruffledLeaf(seed, { centre: [cx, cy], angle, reach, squash, tone, blush
     const line = smooth([place(out * random.between(0.6, 0.72), turn * 0.93), place(out * 0.85, turn + 0.03 * (index % 2 ? 1 : -1)), place(out * 0.99, turn)])
     return stroke(line, lighter(lit, index % 2 ? 0.09 : -0.085), width, { opacity: 0.55 })
   })
-  const ribs = [-0.72, -0.46, -0.2, 0.2, 0.46, 0.72].map(turn => smooth([place(0.12 + Math.abs(turn) * 0.12, turn * 0.12), place(0.46, turn * 0.55), place(0.8, turn * 1.12)]))
+  const ribs = [
+    -0.72, -0.46, -0.2, 0.2, 0.46, 0.72,
+  ].map(turn => smooth([place(0.12 + Math.abs(turn) * 0.12, turn * 0.12), place(0.46, turn * 0.55), place(0.8, turn * 1.12)]))
   const shadow = smooth([place(0.1, -0.6), ...edge, place(0.1, 0.6)].map(([x, y]) => [x + reach * 0.025, y + reach * 0.05]), true)
   return group({},
     fill(shadow, [0.18, 0.08, 145, 0.38]),
@@ -61,7 +70,10 @@ function ruffledLeaf(seed, { centre: [cx, cy], angle, reach, squash, tone, blush
     fill(smooth([place(0.06, -0.5), ...inner(0.84), place(0.06, 0.5)], true), lighter(lit, 0.035), { opacity: 0.8 }),
     waves,
     stroke(ribs.join(''), lighter(lit, 0.1), Math.max(1, reach * 0.014), { opacity: 0.6 }),
-    fill(smooth([place(0.03, -0.6), place(0.36, -0.085), place(0.84, 0), place(0.36, 0.085), place(0.03, 0.6)], true), blend(lighter(lit, 0.16), [0.94, 0.05, 115], 0.5), { opacity: 0.85 }),
+    fill(
+      smooth([place(0.03, -0.6), place(0.36, -0.085), place(0.84, 0), place(0.36, 0.085), place(0.03, 0.6)], true),
+      blend(lighter(lit, 0.16), [0.94, 0.05, 115], 0.5), { opacity: 0.85 },
+    ),
     blush > 0 ? stroke(smooth(edge), [0.42, 0.11, 15], reach * 0.09, { opacity: 0.5 * blush }) : '',
     stroke(smooth(edge), lighter(lit, 0.13), Math.max(1.3, reach * 0.018), { opacity: 0.6 }),
   )

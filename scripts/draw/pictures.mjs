@@ -38,10 +38,16 @@ export const pictures = {
   'tomato-whole-00': tomatoWhole({ height: 210, leaves: 6 }),
   'tomato-whole-14': tomatoWhole({ height: 360, leaves: 9, trusses: [{ share: 0.72, side: 1, flowers: 3 }] }),
   'tomato-whole-28': tomatoWhole({ height: 490, leaves: 13, trusses: [{ share: 0.66, side: 1, flowers: 3 }, { share: 0.5, side: -1, fruits: [0, 0, 0] }] }),
-  'tomato-whole-44': tomatoWhole({ height: 560, leaves: 14, yellow: 0.25, trusses: [{ share: 0.68, side: 1, fruits: [0, 0, 0.1] }, { share: 0.5, side: -1, fruits: [0.3, 0.7, 1] }, { share: 0.4, side: 1, fruits: [0.5, 1] }] }),
+  'tomato-whole-44': tomatoWhole({
+    height: 560, leaves: 14, yellow: 0.25,
+    trusses: [
+      { share: 0.68, side: 1, fruits: [0, 0, 0.1] }, { share: 0.5, side: -1, fruits: [0.3, 0.6, 0.88] },
+      { share: 0.4, side: 1, fruits: [0.45, 0.92] },
+    ],
+  }),
   'tomato-leaf-10': () => leafScene({ kind: 'tomato', seed: 'button-leaf', dew: 9 }),
   'tomato-flower-08': () => trussScene({ seed: 'buttonf', flowers: 5 }),
-  'tomato-fruit-42': () => trussScene({ seed: 'button', fruits: [0.95, 0.7, 0.4, 0.12, 0.03, 0] }),
+  'tomato-fruit-42': () => trussScene({ seed: 'button', fruits: [0.72, 0.45, 0.2, 0.06, 0.03, 0] }),
   'tomato-harvest-47': () => tomatoHarvest({ seed: 'button', count: 18 }),
 
   'basil-whole-03': basilWhole('door', doorVessel, { height: 270, pairs: 3, stems: 3, shoots: false }, 'morning'),
@@ -52,28 +58,44 @@ export const pictures = {
   'basil-leaf-26': () => leafScene({ kind: 'basil', seed: 'door-leaf', yellow: 0.22, neighbours: 0.3, light: 'noon' }),
   'basil-harvest-29': () => basilHarvest({ seed: 'door' }),
 
-  'pepper-whole-16': () => wholeScene({ kind: 'pepper', seed: 'window', light: 'cloudy', vessel: { tone: 'terracotta', height: 290 }, at: [480, 910], plant: { height: 420, leaves: 15, size: 0.36, flowers: [{ x: 0.12, y: 0.66, size: 0.05, ...WHITE }] } }),
+  'pepper-whole-16': () => wholeScene({
+    kind: 'pepper', seed: 'window', light: 'cloudy', vessel: { tone: 'terracotta', height: 290 }, at: [480, 910],
+    plant: { height: 420, leaves: 15, size: 0.36, flowers: [{ x: 0.12, y: 0.66, size: 0.05, ...WHITE }] },
+  }),
 
   'lettuce-set-up': tote({ size: 0.12, leaves: 6 }),
-  'lettuce-whole-07': tote({ size: 0.34, leaves: 9 }),
   'lettuce-roots-14': () => rootsScene({ ...lettuce, day: 14, gap: 1.5, fuzz: 0.3 }),
   'lettuce-whole-21': tote({ size: 0.68, leaves: 15 }),
   'lettuce-roots-28': () => rootsScene({ ...lettuce, day: 28, gap: 7, fuzz: 0.9 }),
   'lettuce-whole-34': tote({ size: 1, leaves: 19 }),
   'lettuce-harvest-36': () => lettuceHarvest({ seed: 'row' }),
 
-  'bottle-basil-roots-08': () => rootsScene({ seed: 'kitchen', vessel: BOTTLE, day: 8, gap: 1, count: 26, clump: 0.7, cmPerDay: 0.8, tone: [0.7, 0.012, 230], lastBirth: 14 }),
-  'bottle-basil-whole-20': basilWhole('kitchen', { top: 122, bottom: 122, height: 300, cup: 58, tone: 'silver', band: false }, { height: 500, pairs: 5 }, 'morning'),
+  'bottle-basil-roots-08': () => rootsScene({
+    seed: 'kitchen', vessel: BOTTLE, day: 8, gap: 1, count: 26, clump: 0.7, cmPerDay: 0.8, tone: [0.7, 0.012, 230], lastBirth: 14,
+  }),
+  'bottle-basil-whole-20': basilWhole(
+    'kitchen', { top: 122, bottom: 122, height: 300, cup: 58, tone: 'silver', band: false }, { height: 500, pairs: 5 }, 'morning',
+  ),
 
-  'aubergine-whole-10': aubergineWhole('morning', { height: 330, leaves: 8, size: 0.46 }),
   'aubergine-roots-14': () => rootsScene({ ...aubergine, day: 14, gap: 3.5, fuzz: 0.4 }),
   'aubergine-roots-22': () => rootsScene({ ...aubergine, day: 22, gap: 8, fuzz: 0.3, colour: 'tan' }),
   'aubergine-flower-26': () => flowerScene({ seed: 'plum' }),
-  'aubergine-whole-30': aubergineWhole('evening', { height: 540, leaves: 13, flowers: [{ x: 0.1, y: 0.68, size: 0.062, ...MAUVE }, { x: -0.16, y: 0.8, size: 0.05, ...MAUVE, turn: 1 }], fruits: [{ x: -0.12, y: 0.55, ...YOUNG_AUBERGINE }] }),
+  'aubergine-whole-30': aubergineWhole(
+    'evening',
+    {
+      height: 540, leaves: 13, flowers: [{ x: 0.1, y: 0.68, size: 0.062, ...MAUVE }, { x: -0.16, y: 0.8, size: 0.05, ...MAUVE, turn: 1 }],
+      fruits: [{ x: -0.12, y: 0.55, ...YOUNG_AUBERGINE }],
+    },
+  ),
   'aubergine-roots-31': () => rootsScene({ ...aubergine, day: 31, gap: 9.5, fuzz: 0.7, colour: 'tan', newColour: 'white', newShare: 0.75 }),
 
-  'lost-pepper-whole-14': () => wholeScene({ kind: 'pepper', seed: 'corner', light: 'noon', vessel: { tone: 'slate', height: 290 }, at: [480, 910], plant: { height: 330, leaves: 12, size: 0.36, droop: 1, yellow: 0.35 } }),
-  'lost-pepper-roots-16': () => rootsScene({ seed: 'corner', vessel: SMALL_BUCKET, day: 12, gap: 1.5, count: 20, colour: 'brown', water: 'murky', bushy: 0.7, clump: 1.5 }),
+  'lost-pepper-whole-14': () => wholeScene({
+    kind: 'pepper', seed: 'corner', light: 'noon', vessel: { tone: 'slate', height: 290 }, at: [480, 910],
+    plant: { height: 330, leaves: 12, size: 0.36, droop: 1, yellow: 0.35 },
+  }),
+  'lost-pepper-roots-16': () => rootsScene({
+    seed: 'corner', vessel: SMALL_BUCKET, day: 12, gap: 1.5, count: 20, colour: 'brown', water: 'murky', bushy: 0.7, clump: 1.5,
+  }),
 
-  'second-lettuce-label': () => labelScene({ seed: 'second', lines: ['lettuce', 'day 0'], tone: 'terracotta', turn: 3 }),
+  'second-lettuce-label': () => labelScene({ seed: 'second', lines: ['lettuce', 'day 0'], tone: 'cream', turn: 3 }),
 }

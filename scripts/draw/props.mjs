@@ -16,7 +16,10 @@ export function table(sheet, { top = 0, tone = [0.66, 0.06, 62], seed = 'table' 
     const wood = lighter(tone, random.around(0, 0.035))
     const veins = Array.from({ length: 9 }, () => {
       const line = random.between(y, next)
-      return stroke(`M-20 ${line}C${width * 0.3} ${line + random.around(0, 16)} ${width * 0.6} ${line + random.around(0, 16)} ${width + 20} ${line + random.around(0, 8)}`, lighter(wood, random.around(-0.05, 0.05)), random.between(1, 5), { opacity: 0.45 })
+      return stroke(
+        `M-20 ${line}C${width * 0.3} ${line + random.around(0, 16)} ${width * 0.6} ${line + random.around(0, 16)} ${width + 20} ${line + random.around(0, 8)}`,
+        lighter(wood, random.around(-0.05, 0.05)), random.between(1, 5), { opacity: 0.45 },
+      )
     })
     return group({}, rectangle(-20, y, width + 40, next - y + 1, wood), veins, rectangle(-20, next - 4, width + 40, 4, lighter(wood, -0.2), { opacity: 0.7 }))
   })
@@ -30,20 +33,35 @@ export function jug(sheet, { x, y, width, height, level = 0.55 }) {
   const foot = half * 0.82
   const waterY = y + height * (1 - level)
   const waterHalf = foot + (half - foot) * level
-  const glass = sheet.linear([x - half, 0], [x + half, 0], [[0, [0.95, 0.015, 210, 0.55]], [0.25, [1, 0, 0, 0.32]], [0.6, [0.85, 0.02, 210, 0.16]], [1, [0.75, 0.03, 215, 0.5]]])
+  const glass = sheet.linear(
+    [x - half, 0], [x + half, 0],
+    [[0, [0.95, 0.015, 210, 0.55]], [0.25, [1, 0, 0, 0.32]], [0.6, [0.85, 0.02, 210, 0.16]], [1, [0.75, 0.03, 215, 0.5]]],
+  )
   const water = sheet.linear([x - half, 0], [x + half, 0], [[0, [0.6, 0.06, 215, 0.75]], [0.35, [0.82, 0.05, 205, 0.62]], [1, [0.52, 0.06, 220, 0.8]]])
   const marks = [0.3, 0.45, 0.6, 0.75].map(share => stroke(`M${x - half * 0.05} ${y + height * (1 - share)}h${half * 0.4}`, [0.35, 0.08, 25, 0.8], 3.2))
   return group({},
     softShadow(sheet, x + half * 0.5, y + height + 4, width * 0.72, lip * 0.9),
-    stroke(`M${x + half * 0.9} ${y + height * 0.2}C${x + half * 1.75} ${y + height * 0.16} ${x + half * 1.8} ${y + height * 0.74} ${x + half * 0.8} ${y + height * 0.74}`, [0.72, 0.025, 215, 0.8], width * 0.1),
-    stroke(`M${x + half * 0.95} ${y + height * 0.18}C${x + half * 1.68} ${y + height * 0.15} ${x + half * 1.74} ${y + height * 0.5} ${x + half * 1.5} ${y + height * 0.62}`, [0.98, 0.01, 210, 0.8], width * 0.03),
+    stroke(
+      `M${x + half * 0.9} ${y + height * 0.2}C${x + half * 1.75} ${y + height * 0.16} ${x + half * 1.8} ${y + height * 0.74} ${x + half * 0.8} ${y + height * 0.74}`,
+      [0.72, 0.025, 215, 0.8], width * 0.1,
+    ),
+    stroke(
+      `M${x + half * 0.95} ${y + height * 0.18}C${x + half * 1.68} ${y + height * 0.15} ${x + half * 1.74} ${y + height * 0.5} ${x + half * 1.5} ${y + height * 0.62}`,
+      [0.98, 0.01, 210, 0.8], width * 0.03,
+    ),
     fill(`M${x - waterHalf} ${waterY}L${x - foot} ${y + height}A${foot} ${lip * 0.8} 0 0 0 ${x + foot} ${y + height}L${x + waterHalf} ${waterY}Z`, water),
     ellipse(x, waterY, waterHalf, lip * 0.9, [0.88, 0.045, 205, 0.85]),
     ellipse(x - waterHalf * 0.3, waterY - 2, waterHalf * 0.4, lip * 0.3, [1, 0.01, 200, 0.7]),
-    fill(`M${x - half} ${y}L${x - foot} ${y + height}A${foot} ${lip * 0.8} 0 0 0 ${x + foot} ${y + height}L${x + half} ${y}A${half} ${lip} 0 0 0 ${x - half} ${y}Z`, glass),
+    fill(
+      `M${x - half} ${y}L${x - foot} ${y + height}A${foot} ${lip * 0.8} 0 0 0 ${x + foot} ${y + height}L${x + half} ${y}A${half} ${lip} 0 0 0 ${x - half} ${y}Z`,
+      glass,
+    ),
     marks,
     stroke(`M${x - half} ${y}A${half} ${lip} 0 0 0 ${x + half} ${y}A${half} ${lip} 0 0 0 ${x - half} ${y}`, [0.97, 0.01, 210, 0.85], 5),
-    fill(`M${x - half * 0.96} ${y - lip * 0.3}Q${x - half * 1.14} ${y - lip * 0.5} ${x - half * 1.24} ${y - lip * 0.6}Q${x - half * 1.12} ${y + lip * 0.5} ${x - half * 0.97} ${y + lip * 0.9}Z`, [0.93, 0.02, 210, 0.75]),
+    fill(
+      `M${x - half * 0.96} ${y - lip * 0.3}Q${x - half * 1.14} ${y - lip * 0.5} ${x - half * 1.24} ${y - lip * 0.6}Q${x - half * 1.12} ${y + lip * 0.5} ${x - half * 0.97} ${y + lip * 0.9}Z`,
+      [0.93, 0.02, 210, 0.75],
+    ),
     stroke(`M${x - half * 0.78} ${y + height * 0.14}L${x - foot * 0.82} ${y + height * 0.86}`, [1, 0, 0, 0.75], width * 0.035, { filter: blur(sheet, 1.5) }))
 }
 
@@ -53,7 +71,10 @@ export function spoon(sheet, { x, y, length, turn = -18 }) {
   const random = makeRandom('salt')
   const grains = Array.from({ length: 150 }, () => {
     const [out, angle] = [Math.sqrt(random.next()), random.between(0, 6.28)]
-    return ellipse(x + Math.cos(angle) * out * 46, y - 6 + Math.sin(angle) * out * 22 - (1 - out) * 14, 2.8, 2.4, [random.between(0.82, 1), 0.02, random.between(180, 240)])
+    return ellipse(
+      x + Math.cos(angle) * out * 46, y - 6 + Math.sin(angle) * out * 22 - (1 - out) * 14, 2.8, 2.4,
+      [random.between(0.82, 1), 0.02, random.between(180, 240)],
+    )
   })
   return group({ transform: `rotate(${turn} ${x} ${y})` },
     softShadow(sheet, x + length * 0.45, y + 26, length * 0.55, 16),
@@ -68,7 +89,9 @@ export function standingCup(sheet, { x, y, top, bottom, height }) {
   const ribs = Array.from({ length: 13 }, (_, index) => {
     const bend = Math.sin((index / 12 - 0.5) * 3)
     const depth = Math.sqrt(1 - bend * bend)
-    return stroke(`M${x + bend * top} ${y + depth * lip}L${x + bend * bottom} ${y + height + depth * lip * 0.6}`, black, 7) + stroke(`M${x + bend * top - 2} ${y + depth * lip}L${x + bend * bottom - 2} ${y + height + depth * lip * 0.6}`, [0.5, 0.015, 220, 0.6], 1.6)
+    return stroke(`M${x + bend * top} ${y + depth * lip}L${x + bend * bottom} ${y + height + depth * lip * 0.6}`, black, 7) + stroke(
+      `M${x + bend * top - 2} ${y + depth * lip}L${x + bend * bottom - 2} ${y + height + depth * lip * 0.6}`, [0.5, 0.015, 220, 0.6], 1.6,
+    )
   })
   const bands = [0.35, 0.7, 1].map((share) => {
     const half = top + (bottom - top) * share
@@ -83,7 +106,10 @@ export function standingCup(sheet, { x, y, top, bottom, height }) {
 
 /** A lid with its hole, leaning or lying flat. */
 export function looseLid(sheet, { x, y, radius, squash, turn = 0, tone }) {
-  const face = sheet.linear([x - radius, y - radius * squash], [x + radius, y + radius * squash], [[0, lighter(tone, 0.16)], [0.5, lighter(tone, 0.03)], [1, lighter(tone, -0.1)]])
+  const face = sheet.linear(
+    [x - radius, y - radius * squash], [x + radius, y + radius * squash],
+    [[0, lighter(tone, 0.16)], [0.5, lighter(tone, 0.03)], [1, lighter(tone, -0.1)]],
+  )
   return group({ transform: `rotate(${turn} ${x} ${y})` },
     softShadow(sheet, x + 22, y + radius * squash * 0.6, radius * 1.06, radius * squash * 0.72),
     ellipse(x, y + radius * 0.06, radius, radius * squash, lighter(tone, -0.14)),
@@ -100,7 +126,16 @@ export function bowl(sheet, { x, y, radius, tone = [0.9, 0.02, 220] }) {
   const outer = sheet.linear([x - radius, 0], [x + radius, 0], [[0, lighter(tone, -0.06)], [0.3, lighter(tone, 0.06)], [1, lighter(tone, -0.28)]])
   const front = `M${x - radius} ${y}A${radius} ${lip} 0 0 0 ${x + radius} ${y}Q${x + radius * 0.86} ${y + radius * 0.6} ${x + radius * 0.42} ${y + radius * 0.66}Q${x} ${y + radius * 0.74} ${x - radius * 0.42} ${y + radius * 0.66}Q${x - radius * 0.86} ${y + radius * 0.6} ${x - radius} ${y}Z`
   return [
-    group({}, softShadow(sheet, x + radius * 0.24, y + radius * 0.64, radius * 0.86, radius * 0.2), ellipse(x, y, radius, lip, inner), stroke(`M${x - radius} ${y}A${radius} ${lip} 0 0 1 ${x + radius} ${y}`, lighter(tone, 0.08), 9)),
-    group({}, fill(front, outer), stroke(`M${x - radius} ${y}A${radius} ${lip} 0 0 0 ${x + radius} ${y}`, lighter(tone, 0.09), 9), stroke(`M${x - radius * 0.93} ${y + radius * 0.2}Q${x - radius * 0.6} ${y + radius * 0.5} ${x} ${y + radius * 0.53}Q${x + radius * 0.6} ${y + radius * 0.5} ${x + radius * 0.93} ${y + radius * 0.2}`, [0.5, 0.09, 245, 0.55], 10)),
+    group(
+      {}, softShadow(sheet, x + radius * 0.24, y + radius * 0.64, radius * 0.86, radius * 0.2), ellipse(x, y, radius, lip, inner),
+      stroke(`M${x - radius} ${y}A${radius} ${lip} 0 0 1 ${x + radius} ${y}`, lighter(tone, 0.08), 9),
+    ),
+    group(
+      {}, fill(front, outer), stroke(`M${x - radius} ${y}A${radius} ${lip} 0 0 0 ${x + radius} ${y}`, lighter(tone, 0.09), 9),
+      stroke(
+        `M${x - radius * 0.93} ${y + radius * 0.2}Q${x - radius * 0.6} ${y + radius * 0.5} ${x} ${y + radius * 0.53}Q${x + radius * 0.6} ${y + radius * 0.5} ${x + radius * 0.93} ${y + radius * 0.2}`,
+        [0.5, 0.09, 245, 0.55], 10,
+      ),
+    ),
   ]
 }

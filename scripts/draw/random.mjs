@@ -9,7 +9,7 @@ export function seedOf(...parts) {
   return hash >>> 0
 }
 
-/** A source of numbers from 0 (included) to 1 (excluded), with the helpers the drawings need. */
+/** A source of numbers from 0 (included) to 1 (excluded), with the kinds of chance the drawings need. */
 export function makeRandom(...parts) {
   let state = seedOf(...parts)
   function next() {

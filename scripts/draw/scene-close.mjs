@@ -30,12 +30,24 @@ export function trussScene({ seed, fruits = [], flowers = 0, light = 'morning' }
     const [x, y] = line[Math.round(share * 20)]
     const side = index % 2 ? 1 : -1
     const at = [x + side * random.between(34, 62) - 20, y + (side > 0 ? random.between(96, 120) : random.between(190, 230))]
-    const stalk = curve([x, y], [x + side * 16, y + 40], [at[0], at[1] - 110], [at[0], at[1] - 60], 8)
+    const stalk = curve([x, y], [x + side * 16, y + 40], [at[0], at[1] - 110], [at[0], at[1] - (index < fruits.length ? 60 : 10)], 8)
     if (index < fruits.length) {
       const radius = random.between(92, 112) * (0.72 + 0.28 * Math.min(1, fruits[index] * 2 + 0.4))
-      return { stalk: stem(stalk, 11, 9, STALKS.tomato), thing: tomatoFruit(sheet, { at: [at[0], at[1] + 30], radius, ripe: fruits[index], seed: `${seed}${index}` }) }
+      return {
+        stalk: stem(stalk, 11, 9, STALKS.tomato),
+        thing: tomatoFruit(sheet, { at: [at[0], at[1] + 30], radius, ripe: fruits[index], seed: `${seed}${index}` }),
+      }
     }
-    return { stalk: stem(stalk, 9, 7, STALKS.tomato), thing: starFlower(sheet, { at, size: random.between(82, 108), petal: [0.88, 0.17, 98], heart: [0.76, 0.16, 82], turn: random.next() * 2, squash: random.between(0.68, 0.92), seed: `${seed}f${index}`, cone: true }) }
+    return {
+      stalk: stem(stalk, 9, 7, STALKS.tomato),
+      thing: starFlower(
+        sheet,
+        {
+          at, size: random.between(82, 108), petal: [0.88, 0.17, 98], heart: [0.76, 0.16, 82], turn: random.next() * 2,
+          squash: random.between(0.68, 0.92), seed: `${seed}f${index}`, cone: true,
+        },
+      ),
+    }
   })
   const picture = group({},
     softTerrace(sheet, { seed, light, horizon: 0.3, floorAt: 0.95 }),
@@ -59,7 +71,15 @@ export function flowerScene({ seed, light = 'evening' }) {
     rectangle(0, 0, 1280, 960, [0.2, 0.05, 150, 0.2]),
     leafCloud(sheet, { kind: 'aubergine', seed, count: 5, size: 430, soft: 5, up: 240 }),
     stem(small, 15, 12, STALKS.aubergine),
-    group({ filter: blur(sheet, 2) }, starFlower(sheet, { at: [1000, 560], size: 105, petal: [0.6, 0.13, 312], heart: [0.8, 0.16, 90], petals: 5, turn: 0.4, squash: 0.6, seed: `${seed}b` })),
+    group(
+      { filter: blur(sheet, 2) },
+      starFlower(
+        sheet,
+        {
+          at: [1000, 560], size: 105, petal: [0.6, 0.13, 312], heart: [0.8, 0.16, 90], petals: 5, turn: 0.4, squash: 0.6, seed: `${seed}b`,
+        },
+      ),
+    ),
     stem(stalk, 22, 17, STALKS.aubergine),
     sepals([560, 500], 300),
     starFlower(sheet, { at: [560, 500], size: 300, petal: lightPetal(mauve), heart: [0.82, 0.165, 90], petals: 6, turn: -0.3, squash: 0.86, seed }),

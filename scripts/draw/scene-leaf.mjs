@@ -34,7 +34,10 @@ export function leafScene({ kind, seed, yellow = 0, light = 'morning', dew = 0, 
 function stalk(line, { veinColour }) {
   const [x, y] = line[0]
   const points = [[x - 190, y + 130], [x - 90, y + 70], [x + 4, y - 4]]
-  return group({}, fill(ribbon(points, () => 22), [veinColour[0] - 0.14, veinColour[1], veinColour[2]]), fill(ribbon(points.map(([px, py]) => [px - 3, py - 5]), () => 8), veinColour))
+  return group(
+    {}, fill(ribbon(points, () => 22), [veinColour[0] - 0.14, veinColour[1], veinColour[2]]),
+    fill(ribbon(points.map(([px, py]) => [px - 3, py - 5]), () => 8), veinColour),
+  )
 }
 
 /** Blurred leaves of the same plant, two depths of them. */
@@ -46,7 +49,10 @@ function crowd(sheet, { kind, seed, colours, yellow }) {
     const place = ([u, v]) => [x + Math.cos(turn) * u * size - Math.sin(turn) * v * size, y + Math.sin(turn) * u * size + Math.cos(turn) * v * size]
     const tone = vary(random, yellow > 0 && random.chance(yellow * 0.6) ? colours.between : colours.green, 2)
     const points = [...left.map(place), ...right.slice().reverse().map(place)]
-    return group({}, fill(smooth(points, true), [tone[0] * 0.86, tone[1], tone[2]]), fill(smooth(left.map(place).concat([place([0, 0])]), true), [tone[0] + 0.05, tone[1], tone[2], 0.8]))
+    return group(
+      {}, fill(smooth(points, true), [tone[0] * 0.86, tone[1], tone[2]]),
+      fill(smooth(left.map(place).concat([place([0, 0])]), true), [tone[0] + 0.05, tone[1], tone[2], 0.8]),
+    )
   }
   return [
     group({ filter: blur(sheet, 24) }, Array.from({ length: 13 }, () => leaf(random.between(320, 560)))),

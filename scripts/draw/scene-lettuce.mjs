@@ -21,7 +21,9 @@ export function toteScene({ seed, size, leaves, tone = 'cream', light = 'noon', 
     toteLid(sheet, colour),
     spots.map(({ x, y, row, index }) => group({},
       cupInLid(sheet, { x, y, radius: 46 + row * 7, seed: `${seed}${index}` }),
-      size > 0 && !missing.includes(index) ? lettucePlant(sheet, { seed: `${seed}h${index}`, centre: [x, y - 12 * size], radius: (30 + 122 * size) * (1 + row * 0.13), leaves, squash: 0.8 }) : '')),
+      size > 0 && !missing.includes(index) ? lettucePlant(
+        sheet, { seed: `${seed}h${index}`, centre: [x, y - 12 * size], radius: (30 + 122 * size) * (1 + row * 0.13), leaves, squash: 0.8 },
+      ) : '')),
   )
   return finished(sheet, picture, { seed: 6, warmth: 0.2, light: [0.1, 0] })
 }
@@ -35,7 +37,10 @@ function toteLid(sheet, tone) {
     fill('M84 752L86 784Q92 836 140 836H1140Q1188 836 1194 784L1196 752Z', lighter(tone, -0.04)),
     fill(top, face),
     fill(top, lighter(tone, -0.1), { filter: cloud(sheet, 0.008, 21, 1.6), opacity: 0.3 }),
-    stroke('M228 128H1052Q1084 128 1090 164L1158 724Q1164 766 1124 766H156Q116 766 122 724L190 164Q196 128 228 128Z', lighter(tone, -0.13), 5, { opacity: 0.6 }),
+    stroke(
+      'M228 128H1052Q1084 128 1090 164L1158 724Q1164 766 1124 766H156Q116 766 122 724L190 164Q196 128 228 128Z', lighter(tone, -0.13), 5,
+      { opacity: 0.6 },
+    ),
     stroke('M230 133H1050Q1078 133 1084 166', lighter(tone, 0.12), 3, { opacity: 0.8 }),
     ellipse(360, 150, 190, 22, [1, 0, 0, 0.4], { filter: blur(sheet, 12) }))
 }

@@ -21,7 +21,10 @@ export function rootsScene({
   const scale = (902 - cupY) / vessel.cupBottom
   const lip = 24
   const halfAt = cm => mid(vessel.top, vessel.bottom, (cm + vessel.cupDepth) / (vessel.cupBottom + vessel.cupDepth)) / 2
-  const wall = { middle, lip, topY: 40, topHalf: halfAt(-(cupY - 40) / scale) * scale, floorY: cupY + vessel.cupBottom * scale, floorHalf: halfAt(vessel.cupBottom) * scale }
+  const wall = {
+    middle, lip, topY: 40, topHalf: halfAt(-(cupY - 40) / scale) * scale, floorY: cupY + vessel.cupBottom * scale,
+    floorHalf: halfAt(vessel.cupBottom) * scale,
+  }
   const surfaceY = cupY + (gap - soak) * scale
   const basin = { ...wall, y: surfaceY, half: halfAt(gap - soak) * scale }
   const tones = WATER_COLOURS[water]

@@ -3,7 +3,7 @@ import { blur } from './filters.mjs'
 import { finished } from './finish.mjs'
 import { LIGHTS, softTerrace } from './backdrop.mjs'
 import { bucket, cupInLid, floorTiles, VESSEL_TONES } from './vessel.mjs'
-import { basilPlant } from './plants-low.mjs'
+import { basilPlant } from './basil.mjs'
 import { bushPlant, tomatoPlant } from './plants-tall.mjs'
 
 const PLANTS = { tomato: tomatoPlant, basil: basilPlant, aubergine: bushPlant, pepper: bushPlant }
@@ -27,7 +27,12 @@ export function wholeScene({ kind, seed, light = 'morning', vessel = {}, plant, 
 }
 
 function castShadow(sheet, x, y, half) {
-  return group({ filter: blur(sheet, 22) }, fill(`M${x - half * 0.6} ${y}L${x + half * 0.9} ${y - 10}L${x + half * 3.2} ${y + 30}L${x + half * 2.4} ${y + 70}Z`, [0.1, 0.03, 260, 0.4]))
+  return group(
+    { filter: blur(sheet, 22) },
+    fill(
+      `M${x - half * 0.6} ${y}L${x + half * 0.9} ${y - 10}L${x + half * 3.2} ${y + 30}L${x + half * 2.4} ${y + 70}Z`, [0.1, 0.03, 260, 0.4],
+    ),
+  )
 }
 
 /** The plant's own shade on the lid. */

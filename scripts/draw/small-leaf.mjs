@@ -8,7 +8,10 @@ import { LEAF_SHAPES, outline } from './leaf-outline.mjs'
  * A leaf of a whole plant. `angle` is the way it leaves the stem, `droop` how far its tip sinks,
  * `tilt` (-1..1) how far the blade turns its left or right side to us; the light comes from the upper left.
  */
-export function smallLeaf({ kind, seed, from, angle, length, droop = 0.3, tilt = 0.2, colour, veinColour, yellow = 0, yellowColour = [0.83, 0.15, 106], gloss = 0.4, width = 1 }) {
+export function smallLeaf({
+  kind, seed, from, angle, length, droop = 0.3, tilt = 0.2, colour, veinColour, yellow = 0, yellowColour = [0.83, 0.15, 106], gloss = 0.4,
+  width = 1,
+}) {
   const random = makeRandom(seed, 'small')
   // A leaf that hangs far down covers less ground: its length stays its length.
   const reach = length * (1 - Math.max(0, droop - 0.5) * 0.5)
@@ -25,7 +28,7 @@ export function smallLeaf({ kind, seed, from, angle, length, droop = 0.3, tilt =
   return group({}, [0, 1].map((index) => {
     const facing = lightOn(angle, index === 0 ? -1 : 1)
     return half(sides[index], line, lighter(tone, facing * 0.075 + up * 0.02), gloss, facing)
-  }), veins({ kind, seed, line, length, width, tilt, edges, tone, veinColour }))
+  }), veins({ kind, line, length, width, tilt, edges, tone, veinColour }))
 }
 
 /** The side of a leaf that looks to the upper left is the bright one. */
@@ -49,12 +52,14 @@ function half(edge, line, tone, gloss, facing) {
   return group({},
     fill(shape, tone),
     fill(sheen, lighter(tone, facing > 0 ? 0.05 : -0.035), { opacity: 0.7 }),
-    facing > 0.1 ? fill(smooth(inner.slice(4, -7).concat(inner.slice(4, -7).reverse().map(([x, y]) => [x + 3, y + 5])), true), [1, 0.02, 110, 0.32 * gloss]) : '',
+    facing > 0.1 ? fill(
+      smooth(inner.slice(4, -7).concat(inner.slice(4, -7).reverse().map(([x, y]) => [x + 3, y + 5])), true), [1, 0.02, 110, 0.32 * gloss],
+    ) : '',
     stroke(smooth(edge), lighter(tone, facing > 0 ? 0.1 : -0.09), 1.3, { opacity: 0.8 }),
   )
 }
 
-function veins({ kind, seed, line, length, width, tilt, edges, tone, veinColour }) {
+function veins({ kind, line, length, width, tilt, edges, tone, veinColour }) {
   const colour = veinColour ?? lighter(tone, 0.13)
   const count = length > 60 ? LEAF_SHAPES[kind].veins : 4
   const ribs = [-1, 1].flatMap((side, which) => {

@@ -34,7 +34,10 @@ export function waterInFront(sheet, basin, tones, { seed, bubbles = 26 }) {
   const random = makeRandom(seed, 'water')
   const surface = lighter(tones[0], 0.22)
   const haze = sheet.linear([0, y], [0, floorY], [[0, [...tones[0], 0.1]], [0.5, [...tones[1], 0.3]], [1, [...tones[1], 0.62]]])
-  const side = sheet.linear([middle - half, 0], [middle + half, 0], [[0, [0.1, 0.03, 220, 0.6]], [0.2, [0.1, 0.03, 220, 0]], [0.75, [0.1, 0.03, 220, 0]], [1, [0.1, 0.03, 220, 0.66]]])
+  const side = sheet.linear(
+    [middle - half, 0], [middle + half, 0],
+    [[0, [0.1, 0.03, 220, 0.6]], [0.2, [0.1, 0.03, 220, 0]], [0.75, [0.1, 0.03, 220, 0]], [1, [0.1, 0.03, 220, 0.66]]],
+  )
   const inside = sheet.clip(fill(body(basin), '#fff'))
   const front = `M${middle - half} ${y}A${half} ${lip} 0 0 0 ${middle + half} ${y}`
   return group({},
@@ -57,7 +60,10 @@ function shafts(sheet, { middle, y, half, floorY, floorHalf }, random) {
     const top = middle + random.around(-half * 0.25, half * 0.7)
     const width = random.between(14, 52)
     const lean = random.between(20, 90)
-    return fill(`M${top} ${y}L${top + width} ${y}L${top + lean + width * 2} ${floorY}L${top + lean} ${floorY}Z`, paint, { opacity: Math.min(1, floorHalf / half) })
+    return fill(
+      `M${top} ${y}L${top + width} ${y}L${top + lean + width * 2} ${floorY}L${top + lean} ${floorY}Z`, paint,
+      { opacity: Math.min(1, floorHalf / half) },
+    )
   }))
 }
 
@@ -76,7 +82,10 @@ function ripples({ middle, y, half, lip }, random) {
     const x = middle + random.around(0, half * 0.6)
     const width = random.between(40, 150)
     const line = y + random.around(0, lip * 0.55)
-    return stroke(`M${x - width / 2} ${line}q${width / 2} ${random.between(3, 8)} ${width} 0`, [0.96, 0.02, 195, random.between(0.15, 0.45)], random.between(1, 2.4))
+    return stroke(
+      `M${x - width / 2} ${line}q${width / 2} ${random.between(3, 8)} ${width} 0`, [0.96, 0.02, 195, random.between(0.15, 0.45)],
+      random.between(1, 2.4),
+    )
   })
 }
 

@@ -41,7 +41,7 @@ export function startApp(args, options) {
   const lastLines = keepLines(child, (line) => {
     log.write(`${line}\n`)
     if (options.showAll) say(line)
-    else if (line.startsWith(FOR_PEOPLE)) say(`  ${line.slice(FOR_PEOPLE.length).trim()}`)
+    else if (line.includes(FOR_PEOPLE)) say(`  ${line.slice(line.indexOf(FOR_PEOPLE) + FOR_PEOPLE.length).trim()}`)
   })
   const exited = new Promise((/** @type {(how: string) => void} */ resolve) => {
     child.once('error', error => resolve(error.message))

@@ -5,7 +5,7 @@
  * package that starts a service, and `--no-defaults` keeps the machine's configuration out.
  */
 import { spawn } from 'node:child_process'
-import { chmodSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs'
+import { chmodSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readFileSync, renameSync, rmSync, symlinkSync, writeFileSync } from 'node:fs'
 import { connect } from 'node:net'
 import { tmpdir } from 'node:os'
 import { dirname, join } from 'node:path'
@@ -62,19 +62,32 @@ export async function ensureDataFolder(tools, folder) {
     const draft = `${folder}.new`
     rmSync(draft, { recursive: true, force: true })
     mkdirSync(draft, { recursive: true, mode: 0o700 })
-    const { code, lastLines } = await run(tools.installer, [
-      '--no-defaults',
-      `--datadir=${draft}`,
-      '--auth-root-authentication-method=normal',
-      '--skip-test-db',
-      '--skip-name-resolve',
-      ...userArguments(),
-    ])
-    if (code !== 0) throw new Refusal([...lastLines, '', 'The database\'s data folder could not be made.'].join('\n'))
+    await fillDataFolder(tools, draft)
     chmodSync(draft, 0o700)
     renameSync(draft, folder)
   })
   return true
+}
+
+/**
+ * @param {MariadbTools} tools
+ * @param {string} folder
+ */
+async function fillDataFolder(tools, folder) {
+  // The installer is a shell script that stumbles over a space in a path, so it gets a link without one.
+  const shortFolder = makeShortFolder()
+  const link = join(shortFolder, 'data')
+  symlinkSync(folder, link)
+  const { code, lastLines } = await run(tools.installer, [
+    '--no-defaults',
+    `--datadir=${link}`,
+    '--auth-root-authentication-method=normal',
+    '--skip-test-db',
+    '--skip-name-resolve',
+    ...userArguments(),
+  ])
+  rmSync(shortFolder, { recursive: true, force: true })
+  if (code !== 0) throw new Refusal([...lastLines, '', 'The database\'s data folder could not be made.'].join('\n'))
 }
 
 /** @param {string} folder */
@@ -93,7 +106,7 @@ export function serverArguments(folder) {
   ]
 }
 
-function makeSocketFolder() {
+function makeShortFolder() {
   const parent = tmpdir().length + '/stillroot-XXXXXX'.length <= LONGEST_SOCKET_FOLDER ? tmpdir() : '/tmp'
   return mkdtempSync(join(parent, 'stillroot-'))
 }
@@ -107,7 +120,7 @@ function makeSocketFolder() {
 export async function startMariadb(tools, options) {
   refuseWhenStopping()
   const port = await freePort()
-  const runtimeFolder = makeSocketFolder()
+  const runtimeFolder = makeShortFolder()
   const initFile = join(runtimeFolder, 'init.sql')
   writeFileSync(initFile, `${options.firstStatements.join(';\n')};\n`, { mode: 0o600 })
   mkdirSync(dirname(options.logFile), { recursive: true })

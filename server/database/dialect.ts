@@ -22,9 +22,9 @@ export const dialectModule = {
 
 function withPlainMeta<T>(result: T): T {
   if (!Array.isArray(result)) return result
-  const copy = [...result]
+  const copy = Object.assign([], result)
   Object.defineProperty(copy, 'meta', {
     value: Reflect.get(result, 'meta'), configurable: true, enumerable: false, writable: true,
   })
-  return copy as T
+  return copy
 }

@@ -7,8 +7,8 @@ const AWAY_CODES = [1_040, 1_053, 1_129, 1_152, 1_184, 1_927, 2_002, 2_003, 2_00
 
 function driverCode(error: unknown): number | null {
   if (!(error instanceof DatabaseError)) return null
-  const { errno } = error.original as Error & { errno?: number }
-  return errno ?? null
+  const errno: unknown = Reflect.get(error.original, 'errno')
+  return typeof errno === 'number' ? errno : null
 }
 
 /** True when trying the same transaction again may succeed at once. */

@@ -1,4 +1,5 @@
 import { ADA, BENNO, MARISOL, ODETTE, TOBIAS, WREN } from './people'
+import { balconyPepper } from './plants/balcony-pepper'
 import { bottleBasil } from './plants/bottle-basil'
 import { cornerPepper } from './plants/corner-pepper'
 import { doorBasil } from './plants/door-basil'
@@ -6,7 +7,6 @@ import { dwarfTomato } from './plants/dwarf-tomato'
 import { secondLettuce } from './plants/second-lettuce'
 import { sixLettuces } from './plants/six-lettuces'
 import { stairAubergine } from './plants/stair-aubergine'
-import { windowPepper } from './plants/window-pepper'
 import type { DemoClub } from './types'
 
 /** A club that does not exist, on a roof nobody will find. The main story comes first. */
@@ -21,6 +21,6 @@ export const demoClub: DemoClub = {
     { email: BENNO, role: 'steward' },
   ],
   plants: [
-    dwarfTomato, doorBasil, windowPepper, sixLettuces, bottleBasil, stairAubergine, cornerPepper, secondLettuce,
+    dwarfTomato, doorBasil, balconyPepper, sixLettuces, bottleBasil, stairAubergine, cornerPepper, secondLettuce,
   ],
 }

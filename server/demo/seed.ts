@@ -5,14 +5,19 @@ import { invite } from '#server/services/clubs/invitations'
 import { joinClub } from '#server/services/clubs/joining'
 import { syncDependencies } from '#server/services/sync/dependencies'
 import { pushOps } from '#server/services/sync/push'
-import { PUSH_OPS_MAX } from '#shared/sync/protocol'
+import { pullFeed } from '#server/services/sync/pull'
+import { accountScope, PULL_LIMIT_MAX, PUSH_OPS_MAX } from '#shared/sync/protocol'
 import type { Op } from '#shared/sync/protocol'
 import accounts from './accounts.json'
 import { demoClub } from './content'
-import { planPlant } from './plan'
+import { demoId } from './demo-id'
+import { op, planPlant } from './plan'
 import { isPhotoStored, plantPhotos } from './seed-photos'
 
 type AccountIds = Map<string, string>
+
+/** How long a notice counts as new in the demo. */
+const NEWS_MILLISECONDS = 8 * 24 * 60 * 60 * 1_000
 
 /**
  * Plants the demo club in an empty database, through the same services that
@@ -34,8 +39,9 @@ export async function seedDemo(uploadsDir: string): Promise<void> {
   const plans = demoClub.plants.map(plant => planPlant(plant, clubId, now))
   for (const plan of plans) {
     await push(idOf(ids, plan.owner), plan.ops)
-    for (const { by, op } of plan.comments) await push(idOf(ids, by), [op])
+    for (const comment of plan.comments) await push(idOf(ids, comment.by), [comment.op], new Date(String(comment.op.fields.writtenAt)))
   }
+  for (const accountId of ids.values()) await markOldNoticesSeen(accountId, now)
   const albums = plans.map(plan => ({ accountId: idOf(ids, plan.owner), photos: plan.photos }))
   await plantPhotos(albums, uploadsDir, (done, all) => say(`demo photos: ${done} of ${all}`), push)
   say('the demo club is there')
@@ -63,10 +69,23 @@ async function makeDemoClub(ids: AccountIds): Promise<string> {
   return place.club.id
 }
 
+/** What the demo's people would have read long ago is not news when somebody signs in as one of them. */
+async function markOldNoticesSeen(accountId: string, now: Date): Promise<void> {
+  const query = { scope: accountScope(accountId), since: 0, limit: PULL_LIMIT_MAX }
+  const { rows } = await pullFeed(syncDependencies(), accountId, query)
+  const old = rows.filter(({ type, data }) => (
+    type === 'notice' && data?.seenAt === null && now.getTime() - Date.parse(String(data.at)) > NEWS_MILLISECONDS
+  ))
+  await push(accountId, old.map(({ id, data }) => ({
+    ...op('notice', id, { seenAt: data?.at }), kind: 'patch', opId: demoId(`seen/${id}`), baseVer: 1,
+  })))
+}
+
 /** @throws Error when the services refuse a record of the demo: it must be as good as anybody's */
-async function push(accountId: string, ops: Op[]): Promise<void> {
+async function push(accountId: string, ops: Op[], at?: Date): Promise<void> {
+  const dependencies = at ? { ...syncDependencies(), now: () => at } : syncDependencies()
   for (let from = 0; from < ops.length; from += PUSH_OPS_MAX) {
-    const results = await pushOps(syncDependencies(), accountId, ops.slice(from, from + PUSH_OPS_MAX))
+    const results = await pushOps(dependencies, accountId, ops.slice(from, from + PUSH_OPS_MAX))
     const refused = results.find(result => result.status === 'retry' || (result.status === 'rejected' && result.code !== 'key_reused'))
     if (refused) throw new Error(`the demo could not be planted: ${JSON.stringify(refused)}`)
   }

@@ -6,6 +6,8 @@ import { migrator } from '../database/migrate'
 import { initModels } from '../database/models/init-models'
 import { assertRequiredSettings } from '../database/required-settings'
 import { seedDemo } from '../demo/seed'
+import { clearUploadTemp } from '../photos/photo-files'
+import { closePhotoWorker } from '../photos/process-photo'
 import { becomeReady } from '../services/readiness'
 import { readConfiguration } from '../utils/configuration'
 import type { Configuration } from '../utils/configuration'
@@ -29,7 +31,10 @@ export default defineNitroPlugin((nitro) => {
     console.error(`[stillroot] ${error instanceof Error ? error.message : String(error)}`)
     process.exit(1)
   })
-  nitro.hooks.hook('close', closeDatabase)
+  nitro.hooks.hook('close', async () => {
+    await closePhotoWorker()
+    await closeDatabase()
+  })
 })
 
 async function start(config: Configuration): Promise<void> {
@@ -38,6 +43,7 @@ async function start(config: Configuration): Promise<void> {
   await assertRequiredSettings()
   const applied = await migrator().up()
   for (const { name } of applied) console.info(`[stillroot] database step ${name} done`)
+  await clearUploadTemp(config.uploadsDir)
   if (config.demo) await seedDemo(config.uploadsDir)
 }
 

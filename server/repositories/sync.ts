@@ -10,7 +10,7 @@ import { Comment } from '../database/models/Comment'
 import { Membership } from '../database/models/Membership'
 import { inSnapshot, inTransaction } from '../database/transaction'
 import { TemporaryFailure } from '../services/sync/ports'
-import type { EntityChange, Receipt, RecordRef, StoredRecord, StoredResult, SyncRepository } from '../services/sync/ports'
+import type { EntityChange, Receipt, RecordRef, StoredRecord, SyncRepository } from '../services/sync/ports'
 import { recordModels, toRecord, toRow } from './record-codec'
 
 /** The records in MariaDB. Every query takes part in the transaction that is going on. */

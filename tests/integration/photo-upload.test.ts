@@ -150,7 +150,7 @@ describe('a photo that is somebody else’s', () => {
 
   it('can be seen but not sent by members of the club in which its plant is shared', async () => {
     const clubId = await ada.club('Roof', ben)
-    const plant = ada.createPlant({ sharedClubId: clubId })
+    const plant = ada.createPlant({ visibility: 'club', clubId })
     await ada.done(plant)
     const photoId = await announce(variant('shared'), plant.entityId)
     expect((await put(ben, photoId, variant('shared'))).status).toBe(404)

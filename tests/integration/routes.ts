@@ -39,6 +39,8 @@ export const routes: ListedRoute[] = [
   { file: 'clubs/[id]/members/[accountId].delete.ts', path: `/api/clubs/${NOBODY}/members/${NOBODY}`, auth: 'account', tests: 'club-members.test.ts' },
   { file: 'invitations/[token]/index.get.ts', path: `/api/invitations/${TOKEN}`, auth: 'public', tests: 'invitations.test.ts' },
   { file: 'invitations/[token]/accept.post.ts', path: `/api/invitations/${TOKEN}/accept`, auth: 'account', tests: 'invitations.test.ts' },
+  { file: 'photos/[id]/content.put.ts', path: `/api/photos/${NOBODY}/content`, auth: 'account', tests: 'photo-upload.test.ts' },
+  { file: 'photos/[id]/[width].get.ts', path: `/api/photos/${NOBODY}/640`, auth: 'account', tests: 'photo-upload.test.ts' },
 ]
 
 /** The method is the last word of the file's name before its ending. */

@@ -38,7 +38,7 @@ describe('an entry card', () => {
 
   it('says what was done, and how much of what', async () => {
     const wrapper = await card({ actions: ['topped-up'], topUpLitres: 1.5, topUpWith: 'plain-water' })
-    expect(wrapper.get('h3').text()).toBe('Topped up')
+    expect(wrapper.get('h2').text()).toBe('Topped up')
     expect(wrapper.text()).toContain('1.5 L plain water added')
   })
 

@@ -1,5 +1,6 @@
+import { snapshotOf } from '~/utils/offline/idb-storage'
 import { StorageFull } from '~/utils/offline/ports'
-import type { JournalStorage, Snapshot, StoredPair } from '~/utils/offline/ports'
+import type { JournalStorage, ReadRequest, Snapshot, StoredPair } from '~/utils/offline/ports'
 
 export type MemoryStorage = JournalStorage & {
   /** The next writing transaction finds the phone full. */
@@ -13,20 +14,21 @@ export function createMemoryStorage(): MemoryStorage {
   const pairs = new Map<string, unknown>()
   let full = false
 
-  function snapshotOf(): Snapshot {
-    return {
-      get: key => copy(pairs.get(key)),
-      under: prefix => [...pairs.keys()].filter(key => key.startsWith(prefix)).sort()
-        .map((key): StoredPair => [key, copy(pairs.get(key))]),
-    }
+  function read({ keys = [], prefixes = [] }: ReadRequest): Snapshot {
+    const under = (prefix: string) => [...pairs.keys()].filter(key => key.startsWith(prefix)).sort()
+      .map((key): StoredPair => [key, copy(pairs.get(key))])
+    return snapshotOf(
+      new Map(keys.map(key => [key, copy(pairs.get(key))])),
+      new Map(prefixes.map(prefix => [prefix, under(prefix)])),
+    )
   }
 
   return {
-    async read() {
-      return snapshotOf()
+    async read(request) {
+      return read(request)
     },
-    async transact(_request, decide) {
-      const { result, put = [], remove = [] } = decide(snapshotOf())
+    async transact(request, decide) {
+      const { result, put = [], remove = [] } = decide(read(request))
       if (full && put.length > 0) {
         full = false
         throw new StorageFull()

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import type { RecordRef, StoredRecord, SyncRepository } from '#server/services/sync/ports'
+import type { RecordRef, StoredRecord, StoredResult, SyncRepository } from '#server/services/sync/ports'
 import { accountScope } from '#shared/sync/protocol'
 import { newId } from './api-client'
 import { validComment, validEntry, validPhoto, validPlant, validVessel } from './valid-fields'
@@ -78,7 +78,9 @@ export function describeSyncRepository(name: string, make: () => Promise<Reposit
 
     describe('a receipt', () => {
       const claim = (account: string, opId: string, payload = 'ab'.repeat(32)) => repository.claimReceipt(account, opId, payload, at)
-      const result = { opId: newId(), status: 'rejected', code: 'invalid', message: 'Größe 🌱', issues: [{ path: 'ph', message: 'is above 14' }] } as const
+      const result: StoredResult = {
+        opId: newId(), status: 'rejected', code: 'invalid', message: 'Größe 🌱', issues: [{ path: 'ph', message: 'is above 14' }],
+      }
 
       it('is new once for an account, and then gives the stored answer as it was', async () => {
         const [account, opId] = [newId(), newId()]

@@ -37,9 +37,22 @@ async function readSnapshot(store: IDBObjectStore, request: ReadRequest): Promis
     return [prefix, found.map((key, index): StoredPair => [String(key), values[index]])]
   })
   const [pairs, pages] = await Promise.all([Promise.all(keyReads), Promise.all(prefixReads)])
-  const byKey = new Map(pairs)
-  const byPrefix = new Map(pages)
-  return { get: key => byKey.get(key), under: prefix => byPrefix.get(prefix) ?? [] }
+  return snapshotOf(new Map(pairs), new Map(pages))
+}
+
+/** What was not read must not look as if there were nothing. */
+export function snapshotOf(byKey: ReadonlyMap<string, unknown>, byPrefix: ReadonlyMap<string, StoredPair[]>): Snapshot {
+  return {
+    get(key) {
+      if (!byKey.has(key)) throw new Error(`${key} was not read`)
+      return byKey.get(key)
+    },
+    under(prefix) {
+      const pairs = byPrefix.get(prefix)
+      if (!pairs) throw new Error(`${prefix} was not read`)
+      return pairs
+    },
+  }
 }
 
 function write(store: IDBObjectStore, changes: StoreChanges): void {

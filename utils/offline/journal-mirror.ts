@@ -8,6 +8,13 @@ import type { JournalStorage, Snapshot } from './ports'
 import { readAttention, readBases, readOutbox, readUploads } from './stored-shapes'
 import type { UploadItem } from './stored-shapes'
 
+const MIRRORED = [prefixes.base, prefixes.outbox, prefixes.attention, prefixes.upload]
+
+/** True for keys whose change a screen could show; drafts, pictures and cursors are none. */
+export function isMirrored(key: string): boolean {
+  return MIRRORED.some(prefix => key.startsWith(prefix))
+}
+
 /** A record whose appearance may have changed. */
 export type ChangedRecord = { type: RecordType, id: string, record: OverlaidRecord | null }
 
@@ -23,7 +30,7 @@ export function createJournalMirror(accountId: string) {
 
   /** Reads everything. */
   async function load(storage: JournalStorage): Promise<ChangedRecord[]> {
-    take(await storage.read({ prefixes: [prefixes.base, prefixes.outbox, prefixes.attention, prefixes.upload] }))
+    take(await storage.read({ prefixes: MIRRORED }))
     const touched = new Map([...bases.values(), ...waitingRecords()].map(record => [`${record.type}/${record.id}`, record]))
     return [...touched.values()].map(appearance)
   }

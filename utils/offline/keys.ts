@@ -15,6 +15,8 @@ export const keys = {
   upload: (photoId: string) => `upload/${photoId}`,
   /** A smaller copy of somebody's photo, kept to be seen without signal. */
   picture: (photoId: string) => `picture/${photoId}`,
+  /** Whose copies are kept, the longest kept first. */
+  keptPictures: 'kept-pictures',
   draft: (plantId: string) => `draft/${plantId}`,
   /** Bytes of a photo that waits in a draft, apart from it so that a letter typed does not write a photo again. */
   draftPhoto: (draftId: string, photoKey: string) => `draft-photo/${draftId}/${photoKey}`,

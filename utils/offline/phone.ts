@@ -4,6 +4,7 @@ import { httpPhotoTransport } from './http-photo-transport'
 import { httpTransport } from './http-transport'
 import { createIdbStorage } from './idb-storage'
 import { runPhotoLane } from './photo-lane'
+import { fetchMissingPictures } from './pictures'
 import type { JournalStorage, Surroundings } from './ports'
 import { runSyncCycle } from './sync-cycle'
 import type { CycleOutcome } from './sync-cycle'
@@ -50,8 +51,19 @@ export function openPhone(accountId: string, listener: PhoneListener): Phone {
   channel.onmessage = (event) => {
     if (Array.isArray(event.data)) listener.onOtherTab(event.data.map(String))
   }
+  let fetching: Promise<void> | null = null
+  /** Beside the syncing, so that nobody waits for pictures to hear that all is sent. */
+  const fetchPictures = () => {
+    fetching ??= fetchMissingPictures({ storage }).catch(() => undefined).finally(() => {
+      fetching = null
+    })
+  }
   const runner = createSyncRunner({
-    cycle: () => textThenPhotos(storage, accountId),
+    async cycle() {
+      const outcome = await textThenPhotos(storage, accountId)
+      if (outcome.kind === 'done') fetchPictures()
+      return outcome
+    },
     around: surroundings,
     withLock: work => withTabLock(`sync:${accountId}`, work),
     setTimer(work, milliseconds) {

@@ -1,9 +1,13 @@
-import { keys } from './keys'
+import { keys, prefixes } from './keys'
 import type { Phone } from './phone'
 import { StorageFull } from './ports'
+import type { Snapshot } from './ports'
+import { readBases } from './stored-shapes'
 
 /** Width of the copies that are kept to be seen without signal, px. */
 const KEPT_WIDTH = 640
+/** Most copies kept, about 60 kB each. */
+const KEPT_MAX = 400
 const TIMEOUT_MILLISECONDS = 20_000
 
 /** Finds the bytes of a photo, on this phone first. Null when they are nowhere to be had. */
@@ -27,11 +31,51 @@ async function fetchPicture(photoId: string): Promise<ArrayBuffer | null> {
   }
 }
 
-/** A full phone does without the copy: it can be had again, what a person wrote cannot. */
-async function keepPicture(phone: Phone, photoId: string, bytes: ArrayBuffer): Promise<void> {
+/**
+ * Fetches the pictures that this phone does not hold yet, newest first, so that
+ * they can be seen without signal. Stops at the first that cannot be had.
+ */
+export async function fetchMissingPictures(phone: Pick<Phone, 'storage'>): Promise<void> {
+  const snapshot = await phone.storage.read({ keys: [keys.keptPictures], prefixes: [prefixes.baseOf('photo')] })
+  const kept = new Set(keptOf(snapshot))
+  const wanted = readBases(snapshot, prefixes.baseOf('photo'))
+    .filter(({ state, data }) => state === 'live' && data?.stored === true)
+    .sort((left, right) => right.id.localeCompare(left.id))
+    .slice(0, KEPT_MAX)
+  for (const { id, data } of wanted) {
+    if (kept.has(id) || await hasOwnBytes(phone, String(data?.sha256))) continue
+    const bytes = await fetchPicture(id)
+    if (!bytes || !await keepPicture(phone, id, bytes)) return
+  }
+}
+
+async function hasOwnBytes({ storage }: Pick<Phone, 'storage'>, sha256: string): Promise<boolean> {
+  return (await storage.read({ keys: [keys.bytes(sha256)] })).get(keys.bytes(sha256)) !== undefined
+}
+
+function keptOf(snapshot: Snapshot): string[] {
+  const kept = snapshot.get(keys.keptPictures)
+  return Array.isArray(kept) ? kept.map(String) : []
+}
+
+/**
+ * Keeps a copy, and lets the longest kept go when there are too many. A full
+ * phone does without: a copy can be had again, what a person wrote cannot.
+ */
+async function keepPicture({ storage }: Pick<Phone, 'storage'>, photoId: string, bytes: ArrayBuffer): Promise<boolean> {
   try {
-    await phone.storage.transact({}, () => ({ result: null, put: [[keys.picture(photoId), bytes]] }))
+    await storage.transact({ keys: [keys.keptPictures] }, (snapshot) => {
+      const kept = [...keptOf(snapshot).filter(id => id !== photoId), photoId]
+      const leaving = kept.slice(0, Math.max(0, kept.length - KEPT_MAX))
+      return {
+        result: null,
+        put: [[keys.picture(photoId), bytes], [keys.keptPictures, kept.slice(leaving.length)]],
+        remove: leaving.map(keys.picture),
+      }
+    })
+    return true
   } catch (error) {
-    if (!(error instanceof StorageFull)) throw error
+    if (error instanceof StorageFull) return false
+    throw error
   }
 }

@@ -10,9 +10,9 @@ export type ReadRequest = {
 }
 
 export type Snapshot = {
-  /** The value under one of the asked keys; undefined when there is none. */
+  /** The value under one of the asked keys; undefined when there is none. @throws Error for a key that was not asked for */
   get: (key: string) => unknown
-  /** Every pair below one of the asked prefixes, in the order of keys. */
+  /** Every pair below one of the asked prefixes, in the order of keys. @throws Error for a prefix that was not asked for */
   under: (prefix: string) => StoredPair[]
 }
 

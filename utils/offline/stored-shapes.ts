@@ -47,7 +47,8 @@ function readUnder<T>(snapshot: Snapshot, prefix: string, schema: z.ZodMiniType<
 export const readOutbox = (snapshot: Snapshot): OutboxItem[] => readUnder(snapshot, 'outbox/', outboxItemSchema)
 export const readAttention = (snapshot: Snapshot): AttentionItem[] => readUnder(snapshot, 'attention/', attentionItemSchema)
 export const readAcked = (snapshot: Snapshot): AckedItem[] => readUnder(snapshot, 'acked/', ackedItemSchema)
-export const readBases = (snapshot: Snapshot): BaseRecord[] => readUnder(snapshot, 'base/', baseRecordSchema)
+/** `prefix` is the one that was asked for when the snapshot was read. */
+export const readBases = (snapshot: Snapshot, prefix = 'base/'): BaseRecord[] => readUnder(snapshot, prefix, baseRecordSchema)
 export const readUploads = (snapshot: Snapshot): UploadItem[] => readUnder(snapshot, 'upload/', uploadItemSchema)
 
 export function readBase(snapshot: Snapshot, key: string): BaseRecord | null {

@@ -83,7 +83,8 @@ async function pullAll(context: SyncContext): Promise<CycleOutcome> {
 
 /** The person's own feed first: it tells of which clubs the others are. */
 async function scopesOf({ storage, accountId }: SyncContext): Promise<string[]> {
-  const memberships = readBases(await storage.read({ prefixes: [prefixes.baseOf('membership')] }))
+  const prefix = prefixes.baseOf('membership')
+  const memberships = readBases(await storage.read({ prefixes: [prefix] }), prefix)
   const clubs = memberships
     .filter(base => base.state === 'live' && base.data?.accountId === accountId)
     .map(base => clubScope(String(base.data?.clubId)))

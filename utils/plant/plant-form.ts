@@ -120,10 +120,17 @@ export function checkPlantForm(
   return parsed.success && issues.length === 0 ? { ok: true, plant: parsed.data, vessel } : { ok: false, issues }
 }
 
-function plantIssues(plant: { cropId: unknown }): Issue[] {
+/** What a field without an answer lacks; its schema would speak of a wrong one. */
+const MISSING: Record<string, string> = { cropId: 'is missing: choose one', setUpOn: 'is missing' }
+
+function plantIssues(plant: { cropId: unknown, setUpOn: string }): Issue[] {
   const checked = checkWith(plantFieldsSchema, plant)
-  const issues = checked.ok ? [] : checked.issues
-  return issues.map(issue => (issue.path === 'cropId' && plant.cropId === null ? { path: 'cropId', message: 'is missing: choose one' } : issue))
+  const missing = new Set([...(plant.cropId === null ? ['cropId'] : []), ...(plant.setUpOn === '' ? ['setUpOn'] : [])])
+  const byPath = new Map<string, Issue>()
+  for (const { path, message } of checked.ok ? [] : checked.issues) {
+    if (!byPath.has(path)) byPath.set(path, { path, message: missing.has(path) ? MISSING[path] ?? message : message })
+  }
+  return [...byPath.values()]
 }
 
 function vesselIssues(vessel: VesselFields): Issue[] {

@@ -5,7 +5,7 @@ import type { CutMeasures } from '~/utils/waterline/vessel-cut'
 import { litres, number } from '~/utils/words/numbers'
 import { cupBottomOf, litresIn } from './vessel-water'
 
-/** Depth of the cup's foot in the water at the start, cm. Publications give 1.3 to 5 cm for a seedling; this is the middle of the lower half. */
+/** Depth of the cup's foot in the water at the start, cm: the lower 2 cm or more (kratky-2004, as at `cupImmersionCm`). */
 const START_IMMERSION_CM = 2
 
 /** The measures that are known, for the drawing; the rest is drawn as in a common bucket. */

@@ -45,8 +45,8 @@ export function railSlice(line: LevelLine, frame: SliceFrame): RailSlice {
   const between = pieces.filter(piece => piece.kind === 'between')
   const cupX = xAt(frame, frame.cupFloorCm ?? frame.topCm)
   return {
-    water: between.map(piece => areaPath(toFloor(piece.points))),
-    deep: between.map(piece => areaPath(toFloor(piece.points.map(point => ({ ...point, x: point.x * DEEP_SHARE }))))),
+    water: between.map(piece => areaPath(band(piece.points))),
+    deep: between.map(piece => areaPath(toFloor(deepEdge(piece.points)))),
     guess: pieces.filter(piece => piece.kind === 'guess').map(piece => areaPath(toFloor(piece.points))),
     surface: between.map(piece => linePath(piece.points)),
     jumps: line.jumps.filter(jump => inFrame(jump.day, frame)).map(jump => linePath([
@@ -80,6 +80,19 @@ function surfacePoints(piece: Piece, frame: SliceFrame): Point[] {
     const day = to - (to - from) * index / count
     return { x: xAt(frame, curveAt(piece.curve, day)), y: yAt(frame, day) }
   })
+}
+
+function deepEdge(points: readonly Point[]): Point[] {
+  return points.map(point => ({ ...point, x: point.x * DEEP_SHARE }))
+}
+
+/** The lighter water only: were it drawn under the deep water too, a hairline of it would show at each seam. */
+function band(points: readonly Point[]): Point[] {
+  const last = points.at(-1)
+  if (!last) return []
+  const surface = [...points, { x: last.x, y: last.y + SEAM_PX }]
+  const inner = deepEdge(surface).map(point => ({ ...point, x: Math.max(0, point.x - SEAM_PX) }))
+  return [...surface, ...inner.reverse()]
 }
 
 function toFloor(points: readonly Point[]): Point[] {

@@ -18,6 +18,7 @@ export function entryValueWords(field: string, value: unknown, options: { timeZo
   if (typeof value === 'number') {
     return reading ? readingText(reading, value, options.locale) : number(value, 2, options.locale)
   }
+  if (field === 'note') return `"${String(value)}"`
   if (field === 'actions') return actionWords(value)
   if (field === 'occurredAt' && typeof value === 'string') return dayAndTime(value, options)
   const kind = topUpSchema.safeParse(value)

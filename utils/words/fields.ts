@@ -1,5 +1,4 @@
 import type { FieldNames } from './issues'
-import { READING_WORDS } from './readings'
 
 /** What each field of a record is called on the screen. */
 export const PLANT_FIELD_WORDS: FieldNames = {
@@ -32,18 +31,4 @@ export const VESSEL_FIELD_WORDS: FieldNames = {
   netCupDepthCm: 'Net cup, depth',
   lightProof: 'Light-proof',
   plantCount: 'Plants in it',
-}
-
-export const ENTRY_FIELD_WORDS: FieldNames = {
-  ...Object.fromEntries(Object.entries(READING_WORDS).map(([field, { label }]) => [field, label])),
-  occurredAt: 'When',
-  recordedAt: 'Typed in',
-  lookedNoChange: 'Looked, no change',
-  note: 'Note',
-  actions: 'What was done',
-  topUpLitres: 'Litres added',
-  topUpWith: 'Topped up with',
-  changeLitres: 'Litres of new solution',
-  harvestGrams: 'Weight picked',
-  harvestCount: 'Pieces picked',
 }

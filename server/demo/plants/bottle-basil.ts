@@ -4,6 +4,7 @@ import type { DemoPlant } from '../types'
 
 const level = levelUnder(19)
 
+/** A clear bottle in a sleeve: the one vessel whose roots show without lifting anything. */
 export const bottleBasil: DemoPlant = {
   owner: TOBIAS,
   setUpDaysAgo: 27,
@@ -12,10 +13,10 @@ export const bottleBasil: DemoPlant = {
   fields: {
     name: 'Kitchen bottle',
     cropId: 'basil',
-    cultivar: 'Small-leaved bush',
-    origin: 'Cutting from the club bed',
+    cultivar: 'Large-leaved',
+    origin: 'Own seed',
     timeZone: TIME_ZONE,
-    place: 'Kitchen window',
+    place: 'Kitchen step, outside',
     visibility: 'club',
     endReason: null,
   },

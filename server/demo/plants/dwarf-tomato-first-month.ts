@@ -4,6 +4,7 @@ import type { DemoEntry } from '../types'
 
 const level = levelUnder(23.5)
 
+/** From set-up to the second change. */
 export const tomatoFirstMonth: DemoEntry[] = [
   {
     day: 0, time: '17:40',

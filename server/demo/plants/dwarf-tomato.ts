@@ -63,7 +63,7 @@ export const dwarfTomato: DemoPlant = {
       day: 35, time: '07:15',
       fields: {
         ...level(12), ph: 6.2, ecMilliSiemensPerCm: 2.1, waterCelsius: 25, airCelsius: 27,
-        note: 'Day 35. Cream on top, white below. Smells of nothing.',
+        note: 'Day 35. Thick and cream-coloured now. Smells of nothing.',
       },
       photos: [{ file: 'tomato-roots-35.jpg', subject: 'roots' }],
     },

@@ -46,11 +46,7 @@ export const sixLettuces: DemoPlant = {
     },
     { day: 2, time: '08:10', fields: { lookedNoChange: true } },
     { day: 4, time: '08:05', fields: { ...level(16), ph: 5.9 } },
-    {
-      day: 7, time: '08:20',
-      fields: { ...level(15.5), ph: 6, ecMilliSiemensPerCm: 1.4, waterCelsius: 19 },
-      photos: [{ file: 'lettuce-whole-07.jpg', subject: 'whole' }],
-    },
+    { day: 7, time: '08:20', fields: { ...level(15.5), ph: 6, ecMilliSiemensPerCm: 1.4, waterCelsius: 19 } },
     { day: 9, time: '18:45', fields: { lookedNoChange: true } },
     { day: 11, time: '08:15', fields: { ...level(14.5), ph: 6, note: 'Lid checked with the torch inside: dark.' } },
     {

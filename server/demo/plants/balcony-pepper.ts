@@ -5,7 +5,7 @@ import type { DemoPlant } from '../types'
 const level = levelUnder(17)
 
 /** Kept to herself: a trial nobody needs to see before it works. */
-export const windowPepper: DemoPlant = {
+export const balconyPepper: DemoPlant = {
   owner: MARISOL,
   setUpDaysAgo: 24,
   sownDaysBeforeSetUp: 50,
@@ -16,7 +16,7 @@ export const windowPepper: DemoPlant = {
     cultivar: 'Sweet, pointed',
     origin: 'Swapped for basil seedlings',
     timeZone: TIME_ZONE,
-    place: 'Bedroom window, outside ledge',
+    place: 'Own balcony, east side',
     visibility: 'private',
     endReason: null,
   },
