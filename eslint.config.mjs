@@ -17,6 +17,8 @@ export default withNuxt(
       // How many attributes fit on a line is a matter of their length, which these two cannot see.
       'vue/max-attributes-per-line': 'off',
       'vue/singleline-html-element-content-newline': 'off',
+      '@stylistic/operator-linebreak': ['error', 'before', { overrides: { '=': 'after' } }],
+      '@stylistic/multiline-ternary': 'off',
     },
   },
   {

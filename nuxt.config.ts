@@ -4,15 +4,6 @@ import { photoWorkerPlugin } from './server/build/photo-worker-plugin'
 const nunitoFiles = '**/nunito-latin*-{400,600,700,800}-normal-*.woff2'
 
 export default defineNuxtConfig({
-  srcDir: '.',
-  buildDir: process.env.STILLROOT_BUILD_DIR ?? '.nuxt',
-  compatibilityDate: '2026-11-01',
-  telemetry: false,
-  // The server names its imports; the module offers its functions only to automatic ones.
-  alias: {
-    '#auth-server': fileURLToPath(new URL('./node_modules/nuxt-auth-utils/dist/runtime/server/utils', import.meta.url)),
-  },
-  devtools: { enabled: false },
   modules: [
     '@pinia/nuxt',
     '@nuxtjs/tailwindcss',
@@ -21,9 +12,9 @@ export default defineNuxtConfig({
     '@vite-pwa/nuxt',
     'nuxt-auth-utils',
   ],
-  css: ['~/assets/css/main.css'],
   components: [{ path: '~/components', pathPrefix: true }],
   imports: { scan: true },
+  devtools: { enabled: false },
   app: {
     head: {
       htmlAttrs: { lang: 'en' },
@@ -40,6 +31,7 @@ export default defineNuxtConfig({
       ],
     },
   },
+  css: ['~/assets/css/main.css'],
   runtimeConfig: {
     databaseUrl: '',
     smtpUrl: '',
@@ -53,9 +45,12 @@ export default defineNuxtConfig({
       cookie: { sameSite: 'lax', httpOnly: true, secure: true, path: '/' },
     },
   },
-  // The app asks for its session itself, with a time limit: the module's own
-  // plugin would hold the first screen back for as long as a server hangs.
-  auth: { loadStrategy: 'none', hash: { scrypt: { cost: 131_072, blockSize: 8, maxMemory: 201_326_592 } } },
+  srcDir: '.',
+  buildDir: process.env.STILLROOT_BUILD_DIR ?? '.nuxt',
+  // The server names its imports; the module offers its functions only to automatic ones.
+  alias: {
+    '#auth-server': fileURLToPath(new URL('./node_modules/nuxt-auth-utils/dist/runtime/server/utils', import.meta.url)),
+  },
   routeRules: {
     '/today': { ssr: false },
     '/plants/**': { ssr: false },
@@ -66,13 +61,29 @@ export default defineNuxtConfig({
     '/attention': { ssr: false },
     '/settings': { ssr: false },
   },
+  compatibilityDate: '2026-11-01',
+  nitro: {
+    imports: { autoImport: false },
+    compressPublicAssets: true,
+    output: process.env.STILLROOT_OUTPUT_DIR ? { dir: process.env.STILLROOT_OUTPUT_DIR } : {},
+    prerender: { routes: ['/200.html'], crawlLinks: false },
+    rollupConfig: { plugins: [photoWorkerPlugin()] },
+  },
+  vite: {
+    server: { fs: { deny: ['.env', '.env.*', '*.{crt,pem}', '**/.git/**', '**/server/uploads/**', '**/.data/**'] } },
+  },
+  typescript: { strict: true },
+  telemetry: false,
+  // The app asks for its session itself, with a time limit: the module's own
+  // plugin would hold the first screen back for as long as a server hangs.
+  auth: { loadStrategy: 'none', hash: { scrypt: { cost: 131_072, blockSize: 8, maxMemory: 201_326_592 } } },
+  eslint: { config: { stylistic: { semi: false, quotes: 'single', commaDangle: 'always-multiline', indent: 2, braceStyle: '1tbs' } } },
   icon: {
     provider: 'server',
     fallbackToApi: false,
     serverBundle: { collections: ['lucide'] },
     clientBundle: { scan: { globInclude: ['**/*.{vue,ts}'], globExclude: ['node_modules', 'dist', 'build', 'coverage', 'test', 'tests', '.*'] }, sizeLimitKb: 64 },
   },
-  tailwindcss: { cssPath: false, exposeConfig: false, viewer: false },
   pwa: {
     strategies: 'injectManifest',
     srcDir: 'service-worker',
@@ -103,15 +114,5 @@ export default defineNuxtConfig({
       ],
     },
   },
-  nitro: {
-    imports: { autoImport: false },
-    compressPublicAssets: true,
-    output: process.env.STILLROOT_OUTPUT_DIR ? { dir: process.env.STILLROOT_OUTPUT_DIR } : {},
-    prerender: { routes: ['/200.html'], crawlLinks: false },
-    rollupConfig: { plugins: [photoWorkerPlugin()] },
-  },
-  vite: {
-    server: { fs: { deny: ['.env', '.env.*', '*.{crt,pem}', '**/.git/**', '**/server/uploads/**', '**/.data/**'] } },
-  },
-  typescript: { strict: true },
+  tailwindcss: { cssPath: false, exposeConfig: false, viewer: false },
 })

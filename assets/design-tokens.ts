@@ -94,10 +94,10 @@ export const textOnGround: Partial<Record<ColourName, readonly ColourName[]>> = 
 
 /** Edges and lines that must be seen, with what lies behind them. */
 export const markOnGround: Partial<Record<ColourName, readonly ColourName[]>> = {
-  'paper': ['edge', 'action'],
-  'card': ['edge', 'action'],
-  'root': ['limit', 'root-line'],
-  'water': ['root-wet'],
+  paper: ['edge', 'action'],
+  card: ['edge', 'action'],
+  root: ['limit', 'root-line'],
+  water: ['root-wet'],
 }
 
 /** "#12303a" as "18 48 58", the form in which Tailwind adds an opacity. */

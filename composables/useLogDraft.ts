@@ -1,6 +1,6 @@
 import { ref, watch } from 'vue'
 import type { Ref } from 'vue'
-import * as z from 'zod/mini'
+import type * as z from 'zod/mini'
 import { useJournalStore } from '~/stores/journal'
 import { keys } from '~/utils/offline/keys'
 

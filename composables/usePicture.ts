@@ -27,12 +27,17 @@ export function usePicture(photo: MaybeRefOrGetter<View<Photo>>) {
     const { id, data } = toValue(photo)
     return `${id}/${data.sha256}/${data.stored}`
   })
-  watch(identity, async () => {
+  async function find(): Promise<void> {
     const { phone } = journal
     const { id, data } = toValue(photo)
     const found = phone ? await findPicture(phone, id, data.sha256, data.stored) : null
     if (id === toValue(photo).id) show(found)
-  }, { immediate: true })
+  }
+  watch(identity, find, { immediate: true })
+  // What could not be had without signal is asked for again when syncing moves on.
+  watch(() => journal.syncState.kind, () => {
+    if (missing.value) void find()
+  })
   onScopeDispose(() => {
     if (shown) URL.revokeObjectURL(shown)
   })

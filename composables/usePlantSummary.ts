@@ -31,15 +31,15 @@ export function usePlantSummary(plant: () => View<Plant>, now: Readonly<Ref<Date
   })
   const lastLook = computed(() => (daysSince.value === null ? null : daysAgo(Math.max(0, daysSince.value))))
 
-  const newestPhoto = computed((): View<Photo>[] => {
-    for (const visit of visits.value) {
-      const taken = photos.ofEntry(visit.id)
-      const best = taken.find(photo => photo.data.subject === 'whole') ?? taken[0]
-      if (best) return [best]
-    }
-    return []
+  /** The newest picture by which a person knows the plant again; roots and labels look alike. */
+  const portrait = computed((): View<Photo>[] => {
+    const taken = visits.value.flatMap(visit => photos.ofEntry(visit.id))
+    const best = taken.find(photo => photo.data.subject === 'whole')
+      ?? taken.find(photo => photo.data.subject === 'leaf' || photo.data.subject === 'fruit')
+      ?? taken[0]
+    return best ? [best] : []
   })
-  const pictures = usePictures(newestPhoto, day)
+  const pictures = usePictures(portrait, day)
   const picture = computed(() => pictures.value[0] ?? null)
 
   const readings = computed(() => {

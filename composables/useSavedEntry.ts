@@ -1,4 +1,5 @@
 import { navigateTo } from '#imports'
+import { useEntriesStore } from '~/stores/entries'
 import { useSyncStore } from '~/stores/sync'
 import { useSavedWord } from './useSavedWord'
 
@@ -6,6 +7,7 @@ import { useSavedWord } from './useSavedWord'
 export function useSavedEntry() {
   const word = useSavedWord()
   const sync = useSyncStore()
+  const entries = useEntriesStore()
   const later = () => (sync.reason === 'no-signal' ? ' It will be sent when there is signal.' : '')
 
   async function showSaved(plantId: string, entryId: string): Promise<void> {
@@ -14,10 +16,14 @@ export function useSavedEntry() {
     await navigateTo({ path: `/plants/${plantId}`, hash: `#entry-${entryId}` }, { replace: true })
   }
 
-  async function showRemoved(plantId: string): Promise<void> {
+  /** Deletes an entry. What went wrong, or null; the page that asked is gone by the time it is done. */
+  async function removeEntry(plantId: string, entryId: string): Promise<string | null> {
+    const outcome = await entries.remove(entryId)
+    if (!outcome.ok) return outcome.message
     word.value = `Deleted on this phone.${later()}`
     await navigateTo(`/plants/${plantId}`, { replace: true })
+    return null
   }
 
-  return { showSaved, showRemoved }
+  return { showSaved, removeEntry }
 }

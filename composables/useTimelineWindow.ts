@@ -5,7 +5,7 @@ import { useRoute } from '#imports'
 type Day = { day: number, entries: readonly { id: string }[] }
 
 /** Entries put on the screen at first, and with every stretch scrolled to. */
-const STRETCH = 24
+const STRETCH = 16
 /** The next stretch is laid out before the reader reaches its place. */
 const AHEAD = '1200px'
 

@@ -1,6 +1,7 @@
 import { defineStore } from 'pinia'
 import { ref, shallowReactive, shallowRef } from 'vue'
 import type { ShallowRef } from 'vue'
+import type * as z from 'zod/mini'
 import { recordSchemas } from '#shared/domain/records'
 import type { RecordOf } from '#shared/domain/records'
 import type { AttentionItem, OutboxItem } from '#shared/sync/outbox'
@@ -78,10 +79,11 @@ export const useJournalStore = defineStore('journal', () => {
 
   function showType<T extends RecordType>(type: T, changes: ChangedRecord[]): void {
     const shelf: ShallowRef<ReadonlyMap<string, View<RecordOf[T]>>> = shelves[type]
+    const schema: z.ZodMiniType<RecordOf[T]> = recordSchemas[type]
     const next = new Map(shelf.value)
     for (const { id, record } of changes) {
-      const parsed = record ? recordSchemas[type].safeParse(record.data) : null
-      if (record && parsed?.success) next.set(id, { ...record, data: parsed.data as RecordOf[T] })
+      const parsed = record ? schema.safeParse(record.data) : null
+      if (record && parsed?.success) next.set(id, { ...record, data: parsed.data })
       else next.delete(id)
     }
     shelf.value = next

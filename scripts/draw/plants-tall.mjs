@@ -149,16 +149,16 @@ export function bushPlant(sheet, { kind, seed, foot, height, leaves, flowers = [
   ), fork.map(line => stem(line, Math.max(3, height * 0.018), 2, STEM[kind])), drawn.slice(cut), fork.map((line, index) => shootTip(
     kind, `${seed}tip${index}`, line.at(-1), height * size * 0.5,
   )),
-    fruits.map(fruit => longFruit(
-      sheet,
-      {
-        ...fruit, at: [foot[0] + fruit.x * height, foot[1] - fruit.y * height], length: fruit.length * height, width: fruit.width * height,
-      },
-    )),
-    flowers.map((flower, index) => starFlower(
-      sheet,
-      { seed: `${seed}f${index}`, ...flower, at: [foot[0] + flower.x * height, foot[1] - flower.y * height], size: flower.size * height },
-    )))
+  fruits.map(fruit => longFruit(
+    sheet,
+    {
+      ...fruit, at: [foot[0] + fruit.x * height, foot[1] - fruit.y * height], length: fruit.length * height, width: fruit.width * height,
+    },
+  )),
+  flowers.map((flower, index) => starFlower(
+    sheet,
+    { seed: `${seed}f${index}`, ...flower, at: [foot[0] + flower.x * height, foot[1] - flower.y * height], size: flower.size * height },
+  )))
 }
 
 function shootTip(kind, seed, tip, length) {

@@ -63,8 +63,7 @@ async function answers(origin) {
     const response = await fetch(`${origin}/api/health`, { signal: AbortSignal.timeout(5_000) })
     const body = await response.json()
     return typeof body === 'object' && body !== null && 'ok' in body && body.ok === true
-  }
-  catch {
+  } catch {
     return false
   }
 }

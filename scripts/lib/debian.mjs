@@ -20,8 +20,7 @@ function isExecutable(path) {
   try {
     accessSync(path, constants.X_OK)
     return true
-  }
-  catch {
+  } catch {
     return false
   }
 }

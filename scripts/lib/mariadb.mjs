@@ -145,8 +145,7 @@ export async function startMariadb(tools, options) {
   whenStopping(stop)
   try {
     await untilReady(child, port, options.logFile)
-  }
-  catch (error) {
+  } catch (error) {
     await stop()
     throw error
   }

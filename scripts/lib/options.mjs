@@ -26,8 +26,7 @@ function parsed() {
         'help': { type: 'boolean', short: 'h' },
       },
     })
-  }
-  catch (error) {
+  } catch (error) {
     throw new Refusal(`${error instanceof Error ? error.message : error}\n"npm start -- --help" lists what can be asked for.`)
   }
 }

@@ -57,8 +57,7 @@ export async function run(program, args, options = {}) {
   try {
     const [code] = await closed
     return { code: code ?? 1, lastLines }
-  }
-  finally {
+  } finally {
     running.delete(end)
   }
 }
@@ -108,8 +107,7 @@ export async function endGroup(child, patience) {
 function signalGroup(pid, signal) {
   try {
     process.kill(-pid, signal)
-  }
-  catch {
+  } catch {
     // It ended between the question and the signal.
   }
 }
@@ -122,8 +120,7 @@ function signalGroup(pid, signal) {
 export function commandLineOf(pid) {
   try {
     return readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0').filter(Boolean)
-  }
-  catch {
+  } catch {
     return []
   }
 }

@@ -18,8 +18,7 @@ function readRecord() {
   if (!existsSync(recordFile)) return undefined
   try {
     return JSON.parse(readFileSync(recordFile, 'utf8'))
-  }
-  catch {
+  } catch {
     return undefined
   }
 }
@@ -50,8 +49,7 @@ function isOurDatabase(pid, folder) {
 function workingFolderOf(pid) {
   try {
     return readlinkSync(`/proc/${pid}/cwd`)
-  }
-  catch {
+  } catch {
     return undefined
   }
 }
@@ -67,8 +65,7 @@ export async function claimDataFolder() {
   try {
     // Fails when a second start got here in the same moment.
     closeSync(openSync(recordFile, 'wx', 0o600))
-  }
-  catch {
+  } catch {
     throw new Refusal('Stillroot is being started from this folder at this very moment.')
   }
   noteRun({ command: process.pid })
@@ -77,8 +74,7 @@ export async function claimDataFolder() {
 function refuseOthersFolder() {
   try {
     accessSync(dataFolder, constants.R_OK | constants.W_OK | constants.X_OK)
-  }
-  catch {
+  } catch {
     throw new Refusal(`${dataFolder} belongs to another account, probably of whoever started Stillroot here first. Start it as that account.`)
   }
 }

@@ -32,8 +32,7 @@ export async function step(label, work) {
     const result = await work()
     say(`  done in ${elapsed()}`)
     return result
-  }
-  finally {
+  } finally {
     clearInterval(ticker)
   }
 }

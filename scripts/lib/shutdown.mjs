@@ -31,8 +31,7 @@ async function undoAll() {
   for (let undo = undos.pop(); undo; undo = undos.pop()) {
     try {
       await undo()
-    }
-    catch (error) {
+    } catch (error) {
       say(explain(error))
     }
   }
@@ -92,8 +91,7 @@ export async function runCommand(main, exitCodeOnSignal) {
   stopOnSignals(exitCodeOnSignal)
   try {
     await leave(await main())
-  }
-  catch (error) {
+  } catch (error) {
     // A step that fails because the whole run is being stopped is no news.
     if (!isStopping()) say(`\n${explain(error)}`)
     if (!isStopping()) await leave(1)

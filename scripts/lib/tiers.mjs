@@ -51,8 +51,7 @@ async function countsOf(tier, provisions, vitestArguments) {
     if (tier === 'static') return await runStaticChecks()
     const env = await provisions.environmentFor(TIERS[tier] ?? [])
     return await runVitest(tier, env, join(provisions.scratch, `${tier}.json`), vitestArguments)
-  }
-  catch (error) {
+  } catch (error) {
     // One tier that cannot be set up must not hide what the others would have said.
     say(explain(error))
     return { passed: 0, failed: 1 }

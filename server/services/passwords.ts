@@ -1,21 +1,8 @@
 import { hashPassword, verifyPassword } from '#auth-server/password'
+import { atMost } from '../utils/at-most'
 
 /** Each hash takes 128 MiB for half a second; more at once would starve a small server. */
-const HASHES_AT_ONCE = 2
-
-let running = 0
-const waiting: (() => void)[] = []
-
-async function inTurn<T>(work: () => Promise<T>): Promise<T> {
-  if (running >= HASHES_AT_ONCE) await new Promise<void>(resolve => waiting.push(resolve))
-  running += 1
-  try {
-    return await work()
-  } finally {
-    running -= 1
-    waiting.shift()?.()
-  }
-}
+const inTurn = atMost(2)
 
 /** The same characters typed on two keyboards are one password (NFC, RFC 8265 §4.2). */
 function normalised(password: string): string {

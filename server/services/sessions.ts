@@ -64,7 +64,8 @@ export async function accountOfRequest(event: H3Event): Promise<Account | null> 
  * would then put that over the cookie of the new session.
  */
 async function sidOf(event: H3Event): Promise<string | null> {
-  if (!getCookie(event, useRuntimeConfig(event).session.name)) return null
+  const { name } = useRuntimeConfig(event).session
+  if (!name || !getCookie(event, name)) return null
   const { secure } = await getUserSession(event)
   const sid: unknown = secure && 'sid' in secure ? secure.sid : null
   return typeof sid === 'string' ? sid : null

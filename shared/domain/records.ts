@@ -12,12 +12,7 @@ const owned = { id: idSchema, ownerId: idSchema }
 const authored = { id: idSchema, authorId: idSchema }
 const nullableId = z.nullable(idSchema)
 
-/**
- * Every record as a phone holds it. What was stored by an older or a newer
- * version of the app is checked with these before a screen sees it; fields that
- * are not named here are left aside.
- */
-export const recordSchemas = {
+const schemas = {
   club: z.object({ ...clubFieldsSchema.shape, id: idSchema }),
   membership: z.object({
     id: idSchema, clubId: idSchema, accountId: idSchema, displayName: z.string(), role: z.enum(CLUB_ROLES),
@@ -52,4 +47,11 @@ export const recordSchemas = {
   }),
 }
 
-export type RecordOf = { [T in keyof typeof recordSchemas]: z.output<(typeof recordSchemas)[T]> }
+export type RecordOf = { [T in keyof typeof schemas]: z.output<(typeof schemas)[T]> }
+
+/**
+ * Every record as a phone holds it. What was stored by an older or a newer
+ * version of the app is checked with these before a screen sees it; fields that
+ * are not named here are left aside.
+ */
+export const recordSchemas: { [T in keyof RecordOf]: z.ZodMiniType<RecordOf[T]> } = schemas

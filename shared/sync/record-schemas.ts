@@ -49,5 +49,9 @@ export function checkWith(schema: z.ZodMiniType, value: unknown): Checked {
       issues: parsed.error.issues.map(issue => ({ path: issue.path.join('.'), message: issue.message })),
     }
   }
-  return { ok: true, fields: { ...(parsed.data as Record<string, unknown>) } }
+  return { ok: true, fields: fieldsOf(parsed.data) }
+}
+
+function fieldsOf(value: unknown): Record<string, unknown> {
+  return typeof value === 'object' && value !== null ? { ...value } : {}
 }

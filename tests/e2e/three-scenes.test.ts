@@ -104,7 +104,7 @@ describe('the job', () => {
 
   it('a member of the club reads that plant’s timeline day by day, and sees the picture', async () => {
     const { page, assertClean } = await phoneOf(member)
-    await page.getByRole('link', { name: 'Club' }).click()
+    await page.getByRole('link', { name: 'Club', exact: true }).click()
     await page.getByRole('link', { name: /Juniper/ }).first().click()
     await page.waitForURL(`**/plants/${plantId}**`)
     await page.getByRole('heading', { name: /Day 7/ }).first().waitFor()
@@ -125,7 +125,7 @@ describe('the job', () => {
     await theirs.page.getByText('Yellow between the veins of old leaves.').waitFor()
     const card = theirs.page.locator(`#entry-${entry.entityId}`)
     await card.getByRole('button', { name: /comment/i }).first().click()
-    await card.getByLabel(/comment/i).fill('Old leaves first: look at magnesium. What is the pH?')
+    await card.getByRole('textbox', { name: /comment/i }).fill('Old leaves first: look at magnesium. What is the pH?')
     await card.getByRole('button', { name: 'Send comment' }).click()
     await syncLineSays(theirs.page, /Everything is sent/)
     theirs.assertClean()
@@ -168,7 +168,7 @@ describe('the job', () => {
     await grower.done(grower.op('patch', 'plant', plantId, 0, { visibility: 'private' }))
     const card = page.getByRole('article').filter({ hasText: 'Yellow between the veins' }).first()
     await card.getByRole('button', { name: /comment/i }).first().click()
-    await card.getByLabel(/comment/i).fill('I had that, too.')
+    await card.getByRole('textbox', { name: /comment/i }).fill('I had that, too.')
     await card.getByRole('button', { name: 'Send comment' }).click()
     await syncLineSays(page, /needs attention/)
     await page.goto(`${app.origin}/attention`)

@@ -6,7 +6,9 @@ import { openTestDatabase } from '../support/opened-database'
 import type { OpenedDatabase } from '../support/opened-database'
 
 let opened: OpenedDatabase
-beforeAll(async () => { opened = await openTestDatabase({ schema: false }) })
+beforeAll(async () => {
+  opened = await openTestDatabase({ schema: false })
+})
 afterAll(() => opened.close())
 
 type Column = { table: string, column: string, type: string, nullable: string, key: string }

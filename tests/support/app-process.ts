@@ -75,8 +75,7 @@ async function isHealthy(origin: string) {
     const response = await fetch(`${origin}/api/health`, { signal: AbortSignal.timeout(5_000) })
     const body: unknown = await response.json()
     return typeof body === 'object' && body !== null && 'ok' in body && body.ok === true
-  }
-  catch {
+  } catch {
     return false
   }
 }

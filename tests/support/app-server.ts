@@ -68,8 +68,7 @@ export async function startApp(options: StartOptions = {}): Promise<RunningApp> 
   }
   try {
     await app.start()
-  }
-  catch (error) {
+  } catch (error) {
     await dispose()
     throw error
   }

@@ -35,8 +35,7 @@ export async function runOn(url: string, sql: string, values: unknown[] = []): P
   })
   try {
     return await connection.query(sql, values)
-  }
-  finally {
+  } finally {
     await connection.end()
   }
 }

@@ -46,6 +46,7 @@ const layerOfPrefix = [
   ['server/types/', 'server-type'],
   ['server/build/', 'tool'],
   ['scripts/', 'tool'],
+  ['bench/', 'tool'],
   ['tests/', 'tool'],
 ] as const
 

@@ -2,32 +2,10 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import type { RecordRef, StoredRecord, StoredResult, SyncRepository } from '#server/services/sync/ports'
 import { accountScope } from '#shared/sync/protocol'
 import { newId } from './api-client'
-import { validComment, validEntry, validPhoto, validPlant, validVessel } from './valid-fields'
+import { at, record, samples } from './sample-records'
+import { validComment, validEntry, validPhoto, validPlant } from './valid-fields'
 
 export type RepositoryUnderTest = { repository: SyncRepository, dispose: () => Promise<void> }
-
-const at = '2026-06-09T05:40:00.123Z'
-
-function record(type: StoredRecord['type'], data: Record<string, unknown>): StoredRecord {
-  return { type, id: newId(), ver: 1, deleted: false, data }
-}
-
-/** One record of each kind with every field of it filled. */
-const samples: StoredRecord[] = [
-  record('club', { name: 'Dachterrasse 🌿', createdAt: at }),
-  record('vessel', { ...validVessel, ownerId: newId(), topLengthCm: 28.5, lightProof: true, plantCount: 2 }),
-  record('vessel', { ...validVessel, ownerId: newId(), lightProof: false, plantCount: null }),
-  record('plant', { ...validPlant, ownerId: newId(), sownOn: '2026-02-28', place: 'نافذة "south"\n<b>' }),
-  record('entry', { ...validEntry, authorId: newId(), ph: 5.85, ecMilliSiemensPerCm: 1.234567, note: '', actions: ['swirled', 'covered'], lookedNoChange: true }),
-  record('photo', { ...validPhoto, authorId: newId(), storedAt: null, placeholder: null, files: null }),
-  record('photo', { ...validPhoto, authorId: newId(), takenAt: at, storedAt: at, placeholder: 'AAAA', files: { 320: { sha256: 'cd'.repeat(32), bytes: 7 } } }),
-  record('comment', { ...validComment, authorId: newId() }),
-  record('notice', { accountId: newId(), code: 'both-kept', plantId: newId(), entryId: null, subjectId: newId(), byAccountId: newId(), at, seenAt: null }),
-  ...['text', '12', 'null', '{"a":1}', '', 5.8, 0, true, false, null, ['swirled'], []].map(otherValue => record('conflict', {
-    entityType: 'entry', entityId: newId(), plantId: newId(), field: 'note', otherValue, ownerId: newId(), byAccountId: newId(), deviceId: newId(),
-    at, resolvedAt: null,
-  })),
-]
 
 /**
  * What everything that keeps the server's records must do, however it keeps them.

@@ -20,7 +20,7 @@ const DELETED: Record<string, string> = { entry: 'Deleting a visit', plant: 'Del
 
 /** What a change was about: "A visit to Juniper". */
 export function changeTitle(op: Pick<Op, 'kind' | 'entityType'>, about: string | null): string {
-  const words = { create: CREATED, patch: CHANGED, delete: DELETED, resolve: {} }[op.kind]
+  const words: Record<string, string> = { create: CREATED, patch: CHANGED, delete: DELETED, resolve: {} }[op.kind]
   const what = words[op.entityType] ?? 'A choice between two values'
   return about ? `${what}: ${about}` : what
 }

@@ -25,8 +25,8 @@ describe('a form that needs the server', () => {
   it('sends once, however often the button is pressed', async () => {
     const form = useServerForm({})
     let asked = 0
-    let answer = (_: { ok: true, body: number }) => {}
-    const first = form.submit(schema, { name: 'x' }, () => new Promise((resolve) => {
+    let answer: (value: { ok: true, body: number }) => void = () => {}
+    const first = form.submit(schema, { name: 'x' }, () => new Promise<{ ok: true, body: number }>((resolve) => {
       asked += 1
       answer = resolve
     }))

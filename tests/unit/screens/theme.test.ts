@@ -18,6 +18,8 @@ describe('the theme before the first paint', () => {
   })
 
   it('does not stop the page where a browser forbids its store', () => {
-    expect(themeWith(() => { throw new Error('denied') })).toBeUndefined()
+    expect(themeWith(() => {
+      throw new Error('denied')
+    })).toBeUndefined()
   })
 })
