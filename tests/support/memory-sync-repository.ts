@@ -23,7 +23,7 @@ export type MemorySyncRepository = SyncRepository & {
 
 /** The records in memory: one transaction after the other, all or nothing. */
 export function createMemorySyncRepository(): MemorySyncRepository {
-  let tables: Tables = { receipts: new Map(), records: new Map(), changes: new Map(), feeds: new Map(), epoch: 'epoch-1' }
+  let tables: Tables = { receipts: new Map(), records: new Map(), changes: new Map(), feeds: new Map(), epoch: '0197f000-0000-7000-8000-0000000000e0' }
   let undo: (() => void)[] | null = null
   let last: Promise<unknown> = Promise.resolve()
   const failures = { before: 0, after: 0 }
@@ -129,7 +129,7 @@ export function createMemorySyncRepository(): MemorySyncRepository {
       setIn(tables.records, keyOf(record), structuredClone(record))
     },
     async changesAfter(entityId, ver) {
-      return (tables.changes.get(entityId) ?? []).filter(change => change.ver > ver)
+      return (tables.changes.get(entityId) ?? []).filter(change => change.ver > ver).sort((left, right) => left.ver - right.ver)
     },
     async appendChange(change) {
       setIn(tables.changes, change.entityId, [...tables.changes.get(change.entityId) ?? [], structuredClone(change)])

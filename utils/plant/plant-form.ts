@@ -113,7 +113,8 @@ export type CheckedPlantForm =
 export function checkPlantForm(
   form: PlantForm, rest: Pick<PlantFields, 'timeZone' | 'endedOn' | 'endReason'>, suggestedName: string, withVessel: boolean,
 ): CheckedPlantForm {
-  const plant = { ...plantFieldsOf(form), ...rest }
+  const { timeZone, endedOn, endReason } = rest
+  const plant = { ...plantFieldsOf(form), timeZone, endedOn, endReason }
   const vessel = withVessel ? vesselFieldsOf(form, suggestedName) : null
   const issues = [...plantIssues(plant), ...(vessel ? vesselIssues(vessel) : [])]
   const parsed = plantFieldsSchema.safeParse(plant)

@@ -64,6 +64,12 @@ describe('the form of a plant', () => {
     expect(checkPlantForm(again, rest, 'Bucket', true)).toEqual({ ...checked, plant: { ...checked.plant, vesselId: VESSEL } })
   })
 
+  it('takes no field from the record that the form asks for itself', () => {
+    const record = { ...rest, endedOn: '2026-07-01', endReason: 'finished' as const, name: 'Before', place: 'before', id: VESSEL, ownerId: CLUB }
+    const checked = checkPlantForm(form({ name: 'After', place: 'after' }), record, 'Bucket', false)
+    expect(checked).toMatchObject({ ok: true, plant: { name: 'After', place: 'after', endedOn: '2026-07-01', endReason: 'finished' } })
+  })
+
   it('keeps a draft with values that could not be saved', () => {
     const draft = form({ name: '', setUpOn: null }, { heightCm: 9_999 })
     expect(plantFormSchema.parse(JSON.parse(JSON.stringify(draft)))).toEqual(draft)
