@@ -4,6 +4,8 @@ import { StorageFull } from './ports'
 import type { Snapshot } from './ports'
 import { readBases } from './stored-shapes'
 
+/** Width of a picture that fills the screen, px. */
+const LARGE_WIDTH = 1_280
 /** Width of the copies that are kept to be seen without signal, px. */
 const KEPT_WIDTH = 640
 /** Most copies kept, about 60 kB each. */
@@ -16,15 +18,22 @@ export async function findPicture(phone: Phone, photoId: string, sha256: string,
   const own = snapshot.get(keys.bytes(sha256)) ?? snapshot.get(keys.picture(photoId))
   if (own instanceof ArrayBuffer) return new Blob([own], { type: 'image/jpeg' })
   if (!stored) return null
-  const bytes = await fetchPicture(photoId)
+  const bytes = await fetchPicture(photoId, KEPT_WIDTH)
   if (!bytes) return null
   await keepPicture(phone, photoId, bytes)
   return new Blob([bytes], { type: 'image/jpeg' })
 }
 
-async function fetchPicture(photoId: string): Promise<ArrayBuffer | null> {
+/** A larger picture than the kept copy, for a full screen. Null without signal, and where the phone has its own. */
+export async function findLargePicture(phone: Phone, photoId: string, sha256: string): Promise<Blob | null> {
+  if (await hasOwnBytes(phone, sha256)) return null
+  const bytes = await fetchPicture(photoId, LARGE_WIDTH)
+  return bytes && new Blob([bytes], { type: 'image/jpeg' })
+}
+
+async function fetchPicture(photoId: string, width: number): Promise<ArrayBuffer | null> {
   try {
-    const response = await fetch(`/api/photos/${photoId}/${KEPT_WIDTH}`, { signal: AbortSignal.timeout(TIMEOUT_MILLISECONDS) })
+    const response = await fetch(`/api/photos/${photoId}/${width}`, { signal: AbortSignal.timeout(TIMEOUT_MILLISECONDS) })
     return response.ok ? await response.arrayBuffer() : null
   } catch {
     return null
@@ -44,7 +53,7 @@ export async function fetchMissingPictures(phone: Pick<Phone, 'storage'>): Promi
     .slice(0, KEPT_MAX)
   for (const { id, data } of wanted) {
     if (kept.has(id) || await hasOwnBytes(phone, String(data?.sha256))) continue
-    const bytes = await fetchPicture(id)
+    const bytes = await fetchPicture(id, KEPT_WIDTH)
     if (!bytes || !await keepPicture(phone, id, bytes)) return
   }
 }

@@ -65,8 +65,13 @@ export function plantFormOf(plant: PlantFields, vessel: VesselFields | null): Pl
     place: plant.place ?? '',
     seenBy: plant.visibility === 'club' ? plant.clubId ?? 'private' : 'private',
     standsIn: plant.vesselId ?? 'none',
-    vessel: vessel ? { ...vessel } : { ...emptyVesselFields },
+    vessel: vesselFormOf(vessel),
   }
+}
+
+/** The part of a vessel's record that the form asks for; its id and owner stay behind. */
+export function vesselFormOf(vessel: VesselFields | null): PlantForm['vessel'] {
+  return plantFormSchema.shape.vessel.parse(vessel ?? emptyVesselFields)
 }
 
 function textOrNull(text: string): string | null {

@@ -60,7 +60,8 @@ describe('the form of a plant', () => {
   it('comes back from a record as it went in', () => {
     const checked = check(form({ seenBy: CLUB, cultivar: 'Dwarf red' }, { shape: 'round', heightCm: 26 }))
     if (!checked.ok || !checked.vessel) throw new Error('the form should have been fine')
-    const again = plantFormOf({ ...checked.plant, vesselId: VESSEL }, checked.vessel)
+    const stored = { ...checked.vessel, id: VESSEL, ownerId: CLUB }
+    const again = plantFormOf({ ...checked.plant, vesselId: VESSEL }, stored)
     expect(checkPlantForm(again, rest, 'Bucket', true)).toEqual({ ...checked, plant: { ...checked.plant, vesselId: VESSEL } })
   })
 
