@@ -1,5 +1,6 @@
 import { fileURLToPath } from 'node:url'
 import { photoWorkerPlugin } from './server/build/photo-worker-plugin'
+import { themeBeforePaint } from './utils/theme'
 
 const nunitoFiles = '**/nunito-latin*-{400,600,700,800}-normal-*.woff2'
 
@@ -25,6 +26,8 @@ export default defineNuxtConfig({
         { name: 'theme-color', content: '#fbf8f1', media: '(prefers-color-scheme: light)' },
         { name: 'theme-color', content: '#0e1f26', media: '(prefers-color-scheme: dark)' },
       ],
+      // Before the first picture: a chosen night must not begin with a flash of day.
+      script: [{ innerHTML: themeBeforePaint }],
       link: [
         { rel: 'icon', href: '/icons/stillroot.svg', type: 'image/svg+xml' },
         { rel: 'apple-touch-icon', href: '/icons/stillroot-180.png' },

@@ -10,7 +10,7 @@ import { Comment } from '../database/models/Comment'
 import { Membership } from '../database/models/Membership'
 import { inSnapshot, inTransaction } from '../database/transaction'
 import { TemporaryFailure } from '../services/sync/ports'
-import type { EntityChange, Receipt, RecordRef, StoredRecord, SyncRepository } from '../services/sync/ports'
+import type { EntityChange, FeedRef, Receipt, StoredRecord, SyncRepository } from '../services/sync/ports'
 import { recordModels, toRecord, toRow } from './record-codec'
 
 /** The records in MariaDB. Every query takes part in the transaction that is going on. */
@@ -45,19 +45,19 @@ export const mariadbSyncRepository: SyncRepository = {
     await write('INSERT INTO scope_counter (scope, seq) VALUES (?, ?) ON DUPLICATE KEY UPDATE seq = seq + VALUES(seq)', [scope, refs.length])
     const [counter] = await read<{ seq: number }>('SELECT seq FROM scope_counter WHERE scope = ?', [scope])
     const first = Number(counter?.seq) - refs.length + 1
-    const places = refs.map(() => '(?, ?, ?, ?)').join(', ')
+    const places = refs.map(() => '(?, ?, ?, ?, ?)').join(', ')
     await write(
-      `INSERT INTO feed_row (scope, seq, entity_type, entity_id) VALUES ${places}`,
-      refs.flatMap((ref, index) => [scope, first + index, ref.type, ref.id]),
+      `INSERT INTO feed_row (scope, seq, entity_type, entity_id, entity_ver) VALUES ${places}`,
+      refs.flatMap((ref, index) => [scope, first + index, ref.type, ref.id, ref.ver]),
     )
   },
 
   async feedAfter(scope, since, limit) {
-    const rows = await read<{ seq: number, type: string, id: string }>(
-      'SELECT seq, entity_type AS type, entity_id AS id FROM feed_row WHERE scope = ? AND seq > ? ORDER BY seq LIMIT ?',
+    const rows = await read<{ seq: number, type: string, id: string, ver: number }>(
+      'SELECT seq, entity_type AS type, entity_id AS id, entity_ver AS ver FROM feed_row WHERE scope = ? AND seq > ? ORDER BY seq LIMIT ?',
       [scope, since, limit],
     )
-    return rows.map(row => ({ seq: Number(row.seq), type: recordType(row.type), id: row.id }))
+    return rows.map(row => ({ seq: Number(row.seq), type: recordType(row.type), id: row.id, ver: Number(row.ver) }))
   },
 
   async feedMinimum(scope) {
@@ -122,9 +122,9 @@ export const mariadbSyncRepository: SyncRepository = {
   },
 
   async descendantsOf(plantId) {
-    const found = await Promise.all((['entry', 'photo', 'comment'] as const).map(async (type) => {
-      const rows = await recordModels[type].findAll({ attributes: ['id'], where: { plantId }, raw: true })
-      return rows.map((row): RecordRef => ({ type, id: String(Reflect.get(row, 'id')) }))
+    const found = await Promise.all((['comment', 'photo', 'entry'] as const).map(async (type) => {
+      const rows = await recordModels[type].findAll({ attributes: ['id', 'ver'], where: { plantId }, raw: true })
+      return rows.map((row): FeedRef => ({ type, id: String(Reflect.get(row, 'id')), ver: Number(Reflect.get(row, 'ver')) }))
     }))
     return found.flat()
   },

@@ -5,6 +5,12 @@ export type BaseRecord = {
   type: RecordType
   id: string
   ver: number
+  /**
+   * The version up to which this phone was told everything, on the record and
+   * below it. An answer to a push raises `ver` but not this: it brings the
+   * record and not, say, the comment that raised its version.
+   */
+  seen: number
   state: 'live' | 'deleted'
   data: Record<string, unknown> | null
   /** The feeds through which this phone may see it. */
@@ -20,7 +26,8 @@ export const UNSURE_VERSION = 0
  */
 export function withFeedRow(base: BaseRecord | null, scope: string, row: FeedRow): BaseRecord | null {
   if (row.state === 'revoked') return base ? withoutScope(base, scope) : null
-  return withState(base, scope, { ...row, state: row.state })
+  const next = withState(base, scope, row)
+  return next && { ...next, seen: Math.max(next.seen, row.seen) }
 }
 
 /** What an answer says of a record, laid on what the phone holds. */
@@ -28,7 +35,7 @@ export function withState(base: BaseRecord | null, scope: string, told: RecordSt
   if (told.state === 'revoked') return base
   const scopes = base ? [...new Set([...base.scopes, scope])] : [scope]
   if (base && base.ver >= told.ver) return { ...base, scopes }
-  return { type: told.type, id: told.id, ver: told.ver, state: told.state, data: told.data, scopes }
+  return { type: told.type, id: told.id, ver: told.ver, seen: base?.seen ?? 0, state: told.state, data: told.data, scopes }
 }
 
 /** The record without one of its feeds; null when it was the last. */

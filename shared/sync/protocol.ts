@@ -49,6 +49,12 @@ export const pushRequestSchema = z.strictObject({
 /** Every feed row speaks of one record as it is now, for one scope. */
 export type FeedRow = {
   seq: number
+  /**
+   * The version at which the row was told. Everything that happened to the
+   * record and below it up to here stands at or before this place of the feed;
+   * `ver` may be later, because readers get the record as it is now.
+   */
+  seen: number
   type: RecordType
   id: string
   ver: number
@@ -59,7 +65,7 @@ export type FeedRow = {
 }
 
 /** A record as the push answer returns it, without a place in a feed. */
-export type RecordState = Omit<FeedRow, 'seq'>
+export type RecordState = Omit<FeedRow, 'seq' | 'seen'>
 
 /** Where in what was sent a problem sits, and what it is. */
 export type FieldIssue = { path: string, message: string }

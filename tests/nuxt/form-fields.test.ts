@@ -3,6 +3,7 @@ import { mountSuspended } from '@nuxt/test-utils/runtime'
 import ChoiceChips from '~/components/form/ChoiceChips.vue'
 import ErrorSummary from '~/components/form/ErrorSummary.vue'
 import SelectField from '~/components/form/SelectField.vue'
+import TextArea from '~/components/form/TextArea.vue'
 import TextField from '~/components/form/TextField.vue'
 
 const choices = [{ value: 'roots', label: 'Roots' }, { value: 'leaf', label: 'Leaf' }, { value: 'fruit', label: 'Fruit' }]
@@ -20,6 +21,16 @@ describe('a text field', () => {
     const wrapper = await mountSuspended(TextField, { props: { label: 'E-mail', type: 'email' } })
     expect(wrapper.get('input').attributes('autocapitalize')).toBe('none')
     expect(wrapper.get('input').attributes('aria-invalid')).toBeUndefined()
+  })
+})
+
+describe('a text area', () => {
+  it('keeps a text that is too long whole, and counts what is too much', async () => {
+    const wrapper = await mountSuspended(TextArea, { props: { label: 'Note', maxlength: 10 } })
+    await wrapper.get('textarea').setValue('Thirteen long')
+    expect(wrapper.emitted('update:modelValue')).toEqual([['Thirteen long']])
+    expect(wrapper.get('textarea').attributes('maxlength')).toBeUndefined()
+    expect(wrapper.text()).toContain('3 characters too many')
   })
 })
 

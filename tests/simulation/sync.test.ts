@@ -4,7 +4,7 @@ import { violations } from './support/invariants'
 import { play, schedule } from './support/schedule'
 import { World } from './support/world'
 
-const SCHEDULES = Number(process.env.STILLROOT_SCHEDULES ?? 200)
+const SCHEDULES = Number(process.env.STILLROOT_SCHEDULES ?? 1_000)
 const seed = Number(process.env.STILLROOT_SEED ?? Math.floor(Math.random() * 2 ** 31))
 
 /**

@@ -1,14 +1,16 @@
 import type { ClubRole } from '#shared/domain/club.schema'
 import { TemporaryFailure } from '#server/services/sync/ports'
-import type { EntityChange, Receipt, RecordRef, StoredRecord, SyncRepository } from '#server/services/sync/ports'
+import type { EntityChange, FeedRef, Receipt, RecordRef, StoredRecord, SyncRepository } from '#server/services/sync/ports'
 
-type Feed = { minimum: number, rows: (RecordRef & { seq: number })[] }
+type Feed = { minimum: number, rows: (FeedRef & { seq: number })[] }
 
 type Tables = {
   receipts: Map<string, Receipt>
   records: Map<string, StoredRecord>
   changes: Map<string, EntityChange[]>
   feeds: Map<string, Feed>
+  /** The place of each change in the order of all. */
+  order: Map<EntityChange, number>
   epoch: string
 }
 
@@ -23,7 +25,7 @@ export type MemorySyncRepository = SyncRepository & {
 
 /** The records in memory: one transaction after the other, all or nothing. */
 export function createMemorySyncRepository(): MemorySyncRepository {
-  let tables: Tables = { receipts: new Map(), records: new Map(), changes: new Map(), feeds: new Map(), epoch: '0197f000-0000-7000-8000-0000000000e0' }
+  let tables: Tables = { receipts: new Map(), records: new Map(), changes: new Map(), feeds: new Map(), order: new Map(), epoch: '0197f000-0000-7000-8000-0000000000e0' }
   let undo: (() => void)[] | null = null
   let last: Promise<unknown> = Promise.resolve()
   const failures = { before: 0, after: 0 }
@@ -99,7 +101,7 @@ export function createMemorySyncRepository(): MemorySyncRepository {
     async appendFeed(scope, refs) {
       const feed = feedOf(scope)
       const from = feed.rows.at(-1)?.seq ?? 0
-      const added = refs.map(({ type, id }, index) => ({ type, id, seq: from + index + 1 }))
+      const added = refs.map(({ type, id, ver }, index) => ({ type, id, ver, seq: from + index + 1 }))
       setIn(tables.feeds, scope, { ...feed, rows: [...feed.rows, ...added] })
     },
     async feedAfter(scope, since, limit) {
@@ -132,7 +134,9 @@ export function createMemorySyncRepository(): MemorySyncRepository {
       return (tables.changes.get(entityId) ?? []).filter(change => change.ver > ver).sort((left, right) => left.ver - right.ver)
     },
     async appendChange(change) {
-      setIn(tables.changes, change.entityId, [...tables.changes.get(change.entityId) ?? [], structuredClone(change)])
+      const kept = structuredClone(change)
+      tables.order.set(kept, tables.order.size)
+      setIn(tables.changes, change.entityId, [...tables.changes.get(change.entityId) ?? [], kept])
     },
 
     async roleIn(clubId, accountId): Promise<ClubRole | null> {
@@ -141,8 +145,8 @@ export function createMemorySyncRepository(): MemorySyncRepository {
       return role === 'grower' || role === 'mentor' || role === 'steward' ? role : null
     },
     async descendantsOf(plantId) {
-      return [...all('entry'), ...all('photo'), ...all('comment')].filter(record => record.data.plantId === plantId)
-        .map(({ type, id }) => ({ type, id }))
+      return [...all('comment'), ...all('photo'), ...all('entry')].filter(record => record.data.plantId === plantId)
+        .map(({ type, id, ver }) => ({ type, id, ver }))
     },
     async plantsInVessel(vesselId) {
       return all('plant').filter(plant => !plant.deleted && plant.data.vesselId === vesselId)

@@ -33,7 +33,7 @@ const pullResponseSchema: z.ZodMiniType<PullResponse> = z.object({
   serverTime: z.string(),
   epoch: z.string(),
   minSchema: z.int(),
-  rows: z.array(z.object({ seq: z.int(), ...recordState })),
+  rows: z.array(z.object({ seq: z.int(), seen: z.int(), ...recordState })),
   next: z.int(),
   more: z.boolean(),
 })

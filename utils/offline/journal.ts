@@ -29,7 +29,9 @@ export async function saveChanges(
     const pending = readOutbox(snapshot).map(item => item.op)
     const ops: Op[] = []
     for (const request of requests) {
-      const version = readBase(snapshot, keys.base(request.entityType, request.entityId))?.ver ?? 0
+      const base = readBase(snapshot, keys.base(request.entityType, request.entityId))
+      // Whoever deletes must have been told everything; whoever changes a field only needs to have seen that.
+      const version = (request.kind === 'delete' ? base?.seen : base?.ver) ?? 0
       ops.push(numbered(request, device, ops.length, baseVersionFor(request.entityId, version, [...pending, ...ops]), around))
     }
     return {

@@ -147,7 +147,7 @@ export async function recoverFromRestore(storage: JournalStorage, around: Surrou
       result: null,
       put: [
         [keys.epoch, epoch],
-        ...readBases(snapshot).map((base): StoredPair => [keys.base(base.type, base.id), { ...base, ver: UNSURE_VERSION }]),
+        ...readBases(snapshot).map((base): StoredPair => [keys.base(base.type, base.id), { ...base, ver: UNSURE_VERSION, seen: UNSURE_VERSION }]),
         ...acked.map(({ op }): StoredPair => [keys.outbox(op.deviceSeq, op.opId), { op, savedAt: isoOf(around.now()) }]),
       ],
       remove: [...acked.map(({ op }) => keys.acked(op.opId)), ...snapshot.under(prefixes.cursor).map(([key]) => key)],

@@ -22,6 +22,7 @@ const baseRecordSchema = z.object({
   type: z.enum(RECORD_TYPES),
   id: z.string(),
   ver: z.int(),
+  seen: z.int(),
   state: z.enum(['live', 'deleted']),
   data: z.nullable(z.record(z.string(), z.unknown())),
   scopes: z.array(z.string()),

@@ -13,14 +13,6 @@ export function noticeWords(code: NoticeCode, who: string, plantName: string): s
   }
 }
 
-export const NOTICE_ICONS: Record<NoticeCode, string> = {
-  'comment-added': 'lucide:message-circle',
-  'both-kept': 'lucide:git-compare',
-  'delete-refused': 'lucide:undo-2',
-  'restored-by-edit': 'lucide:undo-2',
-  'comment-on-deleted': 'lucide:message-circle',
-}
-
 /** Where to see it; null when there is nothing left to see. */
 export function noticeLink({ code, plantId, entryId }: Told): string | null {
   if (code === 'both-kept') return '/attention'

@@ -177,6 +177,7 @@ const tables: [name: string, columns: string][] = [
     seq BIGINT UNSIGNED NOT NULL,
     entity_type VARCHAR(20) NOT NULL,
     entity_id UUID NOT NULL,
+    entity_ver INT UNSIGNED NOT NULL,
     PRIMARY KEY (scope, seq)`],
   ['entity_change', `
     entity_id UUID NOT NULL,

@@ -2,7 +2,7 @@ import type { FieldIssue } from '#shared/sync/protocol'
 import { clubScope } from '#shared/sync/protocol'
 import { sharedClubOf } from '#server/policies/records'
 import type { Step } from './step'
-import type { RecordRef, StoredRecord, SyncRepository } from './ports'
+import type { StoredRecord, SyncRepository } from './ports'
 import type { WorkUnit } from './work-unit'
 
 /** A plant may only name its owner's own vessel, and a club that its owner belongs to. */
@@ -23,7 +23,8 @@ export async function checkPlantLinks(step: Step, data: Record<string, unknown>)
 /**
  * When a plant is shared or taken back, its whole story is told to the club's
  * feed again. What readers get for each row is decided when they ask: the
- * record, or word that it is no longer theirs to see.
+ * record, or word that it is no longer theirs to see. What is below a record is
+ * told before it.
  */
 export async function tellSharingChange(
   repository: SyncRepository, unit: WorkUnit, before: StoredRecord | null, after: StoredRecord,
@@ -32,17 +33,14 @@ export async function tellSharingChange(
   const clubAfter = sharedClubOf(after)
   const vesselChanged = before?.data.vesselId !== after.data.vesselId
   if (clubBefore === clubAfter && !(clubAfter && vesselChanged)) return
-  const story = clubBefore === clubAfter ? vesselsOf(before, after) : [
-    ...vesselsOf(before, after),
-    { type: after.type, id: after.id },
-    ...await repository.descendantsOf(after.id),
-  ]
+  const vessels = await vesselsOf(repository, before, after)
+  const story = clubBefore === clubAfter ? vessels : [...vessels, ...await repository.descendantsOf(after.id), after]
   for (const club of new Set([clubBefore, clubAfter])) {
     if (club) unit.tell([clubScope(club)], story)
   }
 }
 
-function vesselsOf(...plants: (StoredRecord | null)[]): RecordRef[] {
+function vesselsOf(repository: SyncRepository, ...plants: (StoredRecord | null)[]): Promise<StoredRecord[]> {
   const ids = plants.map(plant => plant?.data.vesselId).filter(id => typeof id === 'string')
-  return [...new Set(ids)].map(id => ({ type: 'vessel', id }))
+  return repository.findMany([...new Set(ids)].map(id => ({ type: 'vessel', id })))
 }

@@ -13,6 +13,9 @@ export type StoredRecord = {
 
 export type RecordRef = { type: RecordType, id: string }
 
+/** What a feed keeps of a record: which, and at which version it was told. */
+export type FeedRef = RecordRef & { ver: number }
+
 /** `child`: something below the record changed; `conflict`: a second value was kept beside one of its own. */
 export type ChangeKind = 'create' | 'patch' | 'delete' | 'restore' | 'child' | 'conflict'
 
@@ -50,8 +53,8 @@ export interface SyncRepository {
 
   /** Holds these feeds to the end of the transaction, in sorted order. */
   lockScopes(scopes: string[]): Promise<void>
-  appendFeed(scope: string, refs: RecordRef[]): Promise<void>
-  feedAfter(scope: string, since: number, limit: number): Promise<(RecordRef & { seq: number })[]>
+  appendFeed(scope: string, refs: FeedRef[]): Promise<void>
+  feedAfter(scope: string, since: number, limit: number): Promise<(FeedRef & { seq: number })[]>
   /** Rows up to this number may be gone from the feed. */
   feedMinimum(scope: string): Promise<number>
   epoch(): Promise<string>
@@ -64,8 +67,8 @@ export interface SyncRepository {
   appendChange(change: EntityChange): Promise<void>
 
   roleIn(clubId: string, accountId: string): Promise<ClubRole | null>
-  /** Entries, photos and comments of a plant, deleted ones included. */
-  descendantsOf(plantId: string): Promise<RecordRef[]>
+  /** Comments, photos and entries of a plant, in this order, deleted ones included. */
+  descendantsOf(plantId: string): Promise<FeedRef[]>
   plantsInVessel(vesselId: string): Promise<StoredRecord[]>
   /** Accounts that commented on an entry, at most `limit`. */
   commentersOn(entryId: string, limit: number): Promise<string[]>

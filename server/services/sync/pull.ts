@@ -3,7 +3,7 @@ import { SYNC_SCHEMA_OLDEST } from '#shared/sync/protocol'
 import { feedPruned, notFound } from '#server/utils/errors'
 import { isVisibleInScope, sharedClubOf } from '#server/policies/records'
 import { presentRecord } from '#server/presenters/record'
-import type { RecordRef, StoredRecord, SyncDependencies, SyncRepository } from './ports'
+import type { FeedRef, StoredRecord, SyncDependencies, SyncRepository } from './ports'
 
 /**
  * Reads what changed in a feed since a cursor. A record that changed several
@@ -33,19 +33,20 @@ async function mayReadFeed(repository: SyncRepository, accountId: string, scope:
   return kind === 'user' ? id === accountId : await repository.roleIn(id, accountId) !== null
 }
 
-async function readRows(repository: SyncRepository, scope: string, refs: (RecordRef & { seq: number })[]): Promise<FeedRow[]> {
+async function readRows(repository: SyncRepository, scope: string, refs: (FeedRef & { seq: number })[]): Promise<FeedRow[]> {
   const last = new Map(refs.map(ref => [`${ref.type}/${ref.id}`, ref]))
   const records = await repository.findMany([...last.values()])
   const plants = await plantsOf(repository, records)
   const rows: FeedRow[] = []
   for (const record of records) {
-    const seq = last.get(`${record.type}/${record.id}`)?.seq
-    if (seq === undefined) continue
+    const told = last.get(`${record.type}/${record.id}`)
+    if (!told) continue
+    const { seq, ver: seen } = told
     const shared = record.type === 'vessel' && await vesselIsShared(repository, scope, record)
     const visible = isVisibleInScope(scope, record, plantOf(record, plants), shared)
     rows.push(visible
-      ? { seq, ...presentRecord(record) }
-      : { seq, type: record.type, id: record.id, ver: record.ver, state: 'revoked', data: null })
+      ? { seq, seen, ...presentRecord(record) }
+      : { seq, seen, type: record.type, id: record.id, ver: record.ver, state: 'revoked', data: null })
   }
   return rows.sort((left, right) => left.seq - right.seq)
 }

@@ -2,7 +2,7 @@ import type { Op } from '#shared/sync/protocol'
 import type { FieldChange } from '#shared/sync/merge'
 import type { NoticeCode } from '#shared/domain/notice.schema'
 import { accountScope } from '#shared/sync/protocol'
-import type { ChangeKind, RecordRef, StoredRecord, SyncDependencies } from './ports'
+import type { ChangeKind, FeedRef, StoredRecord, SyncDependencies } from './ports'
 
 type Author = { accountId: string, deviceId: string, opId: string | null }
 
@@ -20,7 +20,7 @@ export const SERVER_DEVICE_ID = '00000000-0000-4000-8000-000000000001'
  * feeds are written last, all at once, so that a record stands in each only once.
  */
 export class WorkUnit {
-  private readonly told = new Map<string, Map<string, RecordRef>>()
+  private readonly told = new Map<string, Map<string, FeedRef>>()
 
   constructor(
     private readonly dependencies: SyncDependencies,
@@ -80,10 +80,14 @@ export class WorkUnit {
     }
   }
 
-  tell(scopes: string[], refs: RecordRef[]): void {
+  /** A record that is told again moves to the end: whatever is below it comes first. */
+  tell(scopes: string[], refs: FeedRef[]): void {
     for (const scope of scopes) {
-      const rows = this.told.get(scope) ?? new Map<string, RecordRef>()
-      for (const { type, id } of refs) rows.set(`${type}/${id}`, { type, id })
+      const rows = this.told.get(scope) ?? new Map<string, FeedRef>()
+      for (const { type, id, ver } of refs) {
+        rows.delete(`${type}/${id}`)
+        rows.set(`${type}/${id}`, { type, id, ver })
+      }
       this.told.set(scope, rows)
     }
   }

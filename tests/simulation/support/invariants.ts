@@ -100,6 +100,7 @@ function deletionsHideNothingUnseen(world: World): string[] {
       if (unseen.length > 0) problems.push(`I5 ${deletion.entityId} was deleted over ${unseen.length} unseen changes`)
     }
   }
+  problems.push(...commentsDeletedUnseen(world))
   const notices = [...records.values()].filter(record => record.type === 'notice').map(record => record.data.subjectId)
   for (const comment of records.values()) {
     if (comment.type !== 'comment') continue
@@ -110,6 +111,22 @@ function deletionsHideNothingUnseen(world: World): string[] {
     if (entry?.deleted && commentedAfter && !notices.includes(comment.id)) problems.push(`I5 a comment on a deleted entry was told to nobody`)
   }
   return problems
+}
+
+/** A comment that was there when its entry was deleted stood on the screen of whoever deleted it. */
+function commentsDeletedUnseen(world: World): string[] {
+  const lines = new Map(world.ledger.map(line => [line.op.opId, line]))
+  const { changes, order } = world.repository.tables()
+  const comments = [...world.repository.tables().records.values()].filter(record => record.type === 'comment')
+  return [...changes.values()].flat().filter(change => change.kind === 'delete' && change.entityType === 'entry').flatMap((deletion) => {
+    const line = lines.get(deletion.opId ?? '')
+    const unseen = comments.filter(({ id, data }) => {
+      const made = changes.get(id)?.[0]
+      return data.entryId === deletion.entityId && made && made.deviceId !== deletion.deviceId
+        && (order.get(made) ?? 0) < (order.get(deletion) ?? 0) && !line?.comments.includes(id)
+    })
+    return unseen.map(({ id }) => `I5 ${deletion.entityId} was deleted with comment ${id}, which ${line?.device.name ?? 'nobody'} had not seen`)
+  })
 }
 
 /** I6, I7: every device holds exactly what its person may see, as the server has it. */

@@ -16,10 +16,17 @@ import { createMemoryStorage } from '../../support/memory-storage'
 import { createMemorySyncRepository } from '../../support/memory-sync-repository'
 import { createFaultyTransport } from './faulty-transport'
 import type { Fault } from './faulty-transport'
+import { entryFields } from './entry-fields'
 import { countingIds, START } from './ids'
 
 /** An operation whose save on the phone completed, and what its writer saw. */
-export type LedgerLine = { op: Op, device: Device, shown: Record<string, unknown> | null }
+export type LedgerLine = {
+  op: Op
+  device: Device
+  shown: Record<string, unknown> | null
+  /** Comments on the record that stood on the screen. */
+  comments: string[]
+}
 
 export type Device = {
   name: string
@@ -87,6 +94,7 @@ export class World {
     if (!first) throw new Error('a world needs a device')
     this.plantId = this.newId()
     await this.save(first, { kind: 'create', entityType: 'plant', entityId: this.plantId, fields: this.plantFields() })
+    await this.save(first, { kind: 'create', entityType: 'entry', entityId: this.newId(), fields: entryFields(this) })
     await this.heal()
   }
 
@@ -94,8 +102,9 @@ export class World {
   async save(device: Device, request: ChangeRequest): Promise<void> {
     this.now += 1_000
     const shown = (await this.view(device, request.entityType, request.entityId))?.data ?? null
+    const comments = (await this.visible(device, 'comment')).filter(comment => comment.data.entryId === request.entityId).map(comment => comment.id)
     const saved = await unlessFull(() => saveChanges(device.storage, this.around(device), [request]))
-    if (saved !== 'store') this.ledger.push(...saved.map(op => ({ op, device, shown })))
+    if (saved !== 'store') this.ledger.push(...saved.map(op => ({ op, device, shown, comments })))
   }
 
   /** One round, as the runner starts it: a store that is full ends the round, and the next one tries again. */

@@ -102,7 +102,7 @@ describe('a cycle', () => {
     const asked: string[] = []
     await cycle(server(() => ({}), async (_account, scope, since) => {
       asked.push(scope)
-      const membership = { seq: 1, type: 'membership' as const, id: newId(), ver: 1, state: 'live' as const, data: { accountId, clubId } }
+      const membership = { seq: 1, seen: 1, type: 'membership' as const, id: newId(), ver: 1, state: 'live' as const, data: { accountId, clubId } }
       return { kind: 'answered', body: { ...emptyPull(since), rows: scope === accountScope(accountId) ? [membership] : [], next: 1 } }
     }))
     expect(asked).toEqual([accountScope(accountId), clubScope(clubId)])
@@ -136,12 +136,12 @@ describe('a cycle', () => {
     const membershipId = newId()
     const rows: Record<string, PullResponse['rows']> = {
       [accountScope(accountId)]: [
-        { seq: 1, type: 'membership', id: membershipId, ver: 1, state: 'live', data: { accountId, clubId } },
-        { seq: 2, type: 'plant', id: 'mine', ver: 1, state: 'live', data: { name: 'Mine' } },
+        { seq: 1, seen: 1, type: 'membership', id: membershipId, ver: 1, state: 'live', data: { accountId, clubId } },
+        { seq: 2, seen: 1, type: 'plant', id: 'mine', ver: 1, state: 'live', data: { name: 'Mine' } },
       ],
       [clubScope(clubId)]: [
-        { seq: 1, type: 'plant', id: 'mine', ver: 1, state: 'live', data: { name: 'Mine' } },
-        { seq: 2, type: 'plant', id: 'theirs', ver: 1, state: 'live', data: { name: 'Theirs' } },
+        { seq: 1, seen: 1, type: 'plant', id: 'mine', ver: 1, state: 'live', data: { name: 'Mine' } },
+        { seq: 2, seen: 1, type: 'plant', id: 'theirs', ver: 1, state: 'live', data: { name: 'Theirs' } },
       ],
     }
     const transport = server(() => ({}), async (_account, scope, since) => {
@@ -150,7 +150,7 @@ describe('a cycle', () => {
     })
     await cycle(transport)
     expect(readBases(await stored()).map(base => base.id).sort()).toEqual([membershipId, 'mine', 'theirs'].sort())
-    rows[accountScope(accountId)]?.push({ seq: 3, type: 'membership', id: membershipId, ver: 2, state: 'deleted', data: null })
+    rows[accountScope(accountId)]?.push({ seq: 3, seen: 1, type: 'membership', id: membershipId, ver: 2, state: 'deleted', data: null })
     await cycle(transport)
     expect(readBases(await stored()).filter(base => base.type === 'plant').map(base => base.id)).toEqual(['mine'])
   })

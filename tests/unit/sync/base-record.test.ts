@@ -3,8 +3,8 @@ import { UNSURE_VERSION, withFeedRow, withState, withoutScope } from '#shared/sy
 import type { BaseRecord } from '#shared/sync/base-record'
 import type { FeedRow } from '#shared/sync/protocol'
 
-const base: BaseRecord = { type: 'plant', id: 'a', ver: 3, state: 'live', data: { name: 'Juniper' }, scopes: ['user:1'] }
-const row = (part: Partial<FeedRow>): FeedRow => ({ seq: 9, type: 'plant', id: 'a', ver: 4, state: 'live', data: { name: 'Marigold' }, ...part })
+const base: BaseRecord = { type: 'plant', id: 'a', ver: 3, seen: 3, state: 'live', data: { name: 'Juniper' }, scopes: ['user:1'] }
+const row = (part: Partial<FeedRow>): FeedRow => ({ seq: 9, seen: part.ver ?? 4, type: 'plant', id: 'a', ver: 4, state: 'live', data: { name: 'Marigold' }, ...part })
 
 describe('withFeedRow', () => {
   it('takes a newer version', () => {
@@ -13,6 +13,12 @@ describe('withFeedRow', () => {
 
   it('never goes back to an older or equal one, but learns that another feed shows it', () => {
     expect(withFeedRow(base, 'club:2', row({ ver: 3 }))).toEqual({ ...base, scopes: ['user:1', 'club:2'] })
+  })
+
+  it('knows up to where it was told everything: a feed says so, an answer to a push does not', () => {
+    expect(withState(base, 'user:1', row({ ver: 6 }))).toMatchObject({ ver: 6, seen: 3 })
+    expect(withFeedRow({ ...base, ver: 6 }, 'user:1', row({ ver: 6, seen: 5 }))).toMatchObject({ ver: 6, seen: 5 })
+    expect(withState(null, 'user:1', row({ ver: 1 }))).toMatchObject({ ver: 1, seen: 0 })
   })
 
   it('forgets a record when the last feed that showed it takes it back', () => {

@@ -3,7 +3,7 @@ import type { BaseRecord } from '#shared/sync/base-record'
 import { overlay } from '#shared/sync/overlay'
 import { makeOp } from '../../support/ops'
 
-const base: BaseRecord = { type: 'entry', id: 'a', ver: 3, state: 'live', data: { id: 'a', note: 'old', ph: 6 }, scopes: ['user:1'] }
+const base: BaseRecord = { type: 'entry', id: 'a', ver: 3, seen: 3, state: 'live', data: { id: 'a', note: 'old', ph: 6 }, scopes: ['user:1'] }
 
 describe('overlay', () => {
   it('shows the server’s record when nothing waits', () => {

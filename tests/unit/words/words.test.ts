@@ -120,6 +120,11 @@ describe('the waterline in words', () => {
     ])
   })
 
+  it('calls a refill a refill, even where it ends no higher than the last reading', () => {
+    const line = buildLevelLine([{ day: 1, levelCm: 18 }, { day: 4, levelCm: 18 }], [{ day: 4, kind: 'topped-up' }], 5)
+    expect(waterlineSentences(line, null, 'en')).toEqual(['Day 4: water 18 cm.', 'Day 4: filled to 18 cm.', 'Day 1: water 18 cm.'])
+  })
+
   it('leaves the limit out while there is none', () => {
     expect(waterlineSentences(buildLevelLine([], [], 3), null)).toEqual([])
   })
