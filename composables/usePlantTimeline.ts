@@ -43,7 +43,7 @@ export function usePlantTimeline(plantId: () => string, now: Readonly<Ref<Date>>
   const untilDay = computed(() => (plant.value ? dayPosition(plant.value.data, until.value) : 0))
   const days = computed(() => (plant.value ? groupByDay(entries.value, plant.value.data) : []))
   const rail = computed(() => (plant.value ? railOf(entries.value, plant.value.data, vessel.value) : { readings: [], steps: [] }))
-  const limitCm = computed(() => refillLimitOf(entries.value, vessel.value))
+  const limitCm = computed(() => (plant.value ? refillLimitOf(entries.value, vessel.value, plant.value.data) : null))
 
   const latest = computed(() => latestReadings(entries.value))
   /** The header tells strength, pH and water; the vessel's picture tells the rest. */

@@ -7,7 +7,7 @@ import type { Vessel } from '#shared/domain/vessel.schema'
 import { useEntriesStore } from '~/stores/entries'
 import { usePlantsStore } from '~/stores/plants'
 import type { View } from '~/types/view'
-import { aboveLimitWords, levelHints, limitWords } from '~/utils/log/level-words'
+import { aboveLimitWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
 import type { LogForm } from '~/utils/log/log-form'
 import { dayOf, latestReadings, refillLimitOf } from '~/utils/plant/timeline'
 import { levelOf } from '~/utils/plant/vessel-water'
@@ -40,18 +40,20 @@ export function useVisitHints(
   const aims = computed(() => plant.value ? aimsOf(plant.value.data.cropId) : {})
   const verdicts = computed(() => plant.value ? verdictsOf(form.value.readings, plant.value.data.cropId) : {})
   const last = computed(() => latestReadings(past.value).readings)
-  const limitCm = computed(() => refillLimitOf(past.value, vessel.value))
+  const settingUp = computed(() => (day.value ?? 0) <= 0)
+  /** No root has learnt to breathe on the day of set-up, so a first filling may be put right. */
+  const limitCm = computed(() => settingUp.value || !plant.value ? null : refillLimitOf(past.value, vessel.value, plant.value.data))
   const hints = computed<Partial<Record<ReadingField, string>>>(() => levelHints(form.value.readings, vessel.value))
   const caution = computed(() => limitWords(limitCm.value, vessel.value))
-  const aboveLimit = computed(() => {
+  const levelCaution = computed(() => {
     const level = levelOf(form.value.readings, vessel.value)
-    return aboveLimitWords(level, limitCm.value, vessel.value)
+    return settingUp.value ? belowCupWords(level, vessel.value) : aboveLimitWords(level, limitCm.value, vessel.value)
   })
   const phIsOff = computed(() => (verdicts.value.ph?.side ?? 'in') !== 'in')
   /** Setting up happens on the first day. */
   const offered = computed<EntryAction[]>(() => ENTRY_ACTIONS.filter(action => (
-    action !== 'set-up' || (day.value ?? 0) <= 0 || form.value.actions.includes('set-up')
+    action !== 'set-up' || settingUp.value || form.value.actions.includes('set-up')
   )))
 
-  return { vessel, day, aims, verdicts, last, hints, limitCm, caution, aboveLimit, phIsOff, offered }
+  return { vessel, day, aims, verdicts, last, hints, limitCm, caution, levelCaution, phIsOff, offered }
 }

@@ -1,6 +1,6 @@
 import type { ReadingField } from '#shared/domain/entry.schema'
 import type { VesselFields } from '#shared/domain/vessel.schema'
-import { gapOf, levelOf, litresIn } from '~/utils/plant/vessel-water'
+import { cupBottomOf, gapOf, levelOf, litresIn } from '~/utils/plant/vessel-water'
 import { litres, number } from '~/utils/words/numbers'
 import type { Readings } from '~/utils/words/readings'
 
@@ -33,4 +33,14 @@ export function limitWords(limitCm: number | null, vessel: VesselFields | null):
 export function aboveLimitWords(levelCm: number | null, limitCm: number | null, vessel: VesselFields | null): string | null {
   if (levelCm === null || limitCm === null || levelCm <= limitCm) return null
   return `This is above the refill limit of ${withLitres(limitCm, vessel)}. Roots that breathe air may be harmed under water. If the water stands that high now, take some out. You can save it as it is.`
+}
+
+/**
+ * Said on the day of set-up when the water ends below the net cup: nothing drinks there yet.
+ * That the water touches the cup at the start is common practice, no source.
+ */
+export function belowCupWords(levelCm: number | null, vessel: VesselFields | null): string | null {
+  const cupCm = cupBottomOf(vessel)
+  if (levelCm === null || cupCm === null || levelCm >= cupCm) return null
+  return `The water ends ${number(cupCm - levelCm)} cm below the net cup. Unless roots hang into it already, the plant dries out: fill until the cup touches the water, at ${withLitres(cupCm, vessel)}. You can save it as it is.`
 }

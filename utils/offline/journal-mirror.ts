@@ -30,7 +30,9 @@ export function createJournalMirror(accountId: string) {
 
   /** Reads everything. */
   async function load(storage: JournalStorage): Promise<ChangedRecord[]> {
-    take(await storage.read({ prefixes: MIRRORED }))
+    const snapshot = await storage.read({ prefixes: MIRRORED })
+    take(snapshot)
+    if (bases.size < snapshot.under(prefixes.base).length) await readAgainFromServer(storage)
     const touched = new Map([...bases.values(), ...waitingRecords()].map(record => [`${record.type}/${record.id}`, record]))
     return [...touched.values()].map(appearance)
   }
@@ -86,3 +88,14 @@ export function createJournalMirror(accountId: string) {
 }
 
 export type JournalMirror = ReturnType<typeof createJournalMirror>
+
+/**
+ * A record that this version of the app cannot read must not look as if it had
+ * never been: every feed is read from its start, and what the server has takes
+ * the unreadable record's place.
+ */
+async function readAgainFromServer(storage: JournalStorage): Promise<void> {
+  await storage.transact({ prefixes: [prefixes.cursor] }, snapshot => ({
+    result: null, remove: snapshot.under(prefixes.cursor).map(([key]) => key),
+  }))
+}

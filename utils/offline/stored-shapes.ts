@@ -22,7 +22,8 @@ const baseRecordSchema = z.object({
   type: z.enum(RECORD_TYPES),
   id: z.string(),
   ver: z.int(),
-  seen: z.int(),
+  // Rows of the first build had none; 0 claims the least.
+  seen: z._default(z.int(), 0),
   state: z.enum(['live', 'deleted']),
   data: z.nullable(z.record(z.string(), z.unknown())),
   scopes: z.array(z.string()),

@@ -80,10 +80,14 @@ export function railOf(entries: readonly Kept[], plant: PlantClock, vessel: Vess
 export function refillLimitOf(
   entries: readonly { data: Pick<EntryFields, 'occurredAt' | 'waterLevelCm' | 'airGapCm' | 'actions'> }[],
   vessel: VesselFields | null,
+  plant: PlantClock,
 ): number | null {
   const levels = entries.flatMap(({ data }) => {
     const levelCm = levelOf(data, vessel)
-    return levelCm === null ? [] : [{ atMs: Date.parse(data.occurredAt), levelCm, solutionChange: data.actions.includes('changed-solution') }]
-  })
-  return refillLimitCm(levels, { cupBottomCm: cupBottomOf(vessel) })
+    const day = dayOf(plant, data.occurredAt)
+    return levelCm === null ? [] : [{ day, atMs: Date.parse(data.occurredAt), levelCm, solutionChange: data.actions.includes('changed-solution') }]
+  }).sort((left, right) => left.atMs - right.atMs)
+  // While the vessel is being set up nothing hangs in the air yet: only how it was left that day counts.
+  const settingUp = levels.filter(level => level.day <= 0).slice(-1)
+  return refillLimitCm([...settingUp, ...levels.filter(level => level.day > 0)], { cupBottomCm: cupBottomOf(vessel) })
 }

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { emptyVesselFields } from '#shared/domain/vessel.schema'
 import { issueSentence } from '~/utils/log/issue-words'
-import { aboveLimitWords, levelHints, limitWords } from '~/utils/log/level-words'
+import { aboveLimitWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
 import { emptyLogForm } from '~/utils/log/log-form'
 import { rangeLines } from '~/utils/log/range-words'
 import { entryValueWords } from '~/utils/words/conflict'
@@ -27,6 +27,11 @@ describe('what a level means', () => {
     expect([aboveLimitWords(17, 17, bucket), aboveLimitWords(null, 17, bucket), aboveLimitWords(17, null, bucket)]).toEqual([null, null, null])
     expect(limitWords(17, null)).toMatch(/^Fill to 17 cm at most/)
     expect(limitWords(null, bucket)).toBeNull()
+  })
+
+  it('is warned of at set-up while the cup hangs dry', () => {
+    expect(belowCupWords(20, bucket)).toMatch(/^The water ends 4 cm below the net cup\. .* at 24 cm \(7\.5 L\)/)
+    expect([belowCupWords(24, bucket), belowCupWords(null, bucket), belowCupWords(20, null)]).toEqual([null, null, null])
   })
 })
 

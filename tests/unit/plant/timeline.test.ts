@@ -66,8 +66,20 @@ describe('what is known now', () => {
   })
 
   it('sets the refill limit 2 cm above the lowest level', () => {
-    expect(refillLimitOf(entries, bucket)).toBe(18)
-    expect(refillLimitOf([], bucket)).toBeNull()
+    expect(refillLimitOf(entries, bucket, plant)).toBe(18)
+    expect(refillLimitOf([], bucket, plant)).toBeNull()
+  })
+
+  it('counts of the day of set-up only how the vessel was left: a first filling may be put right', () => {
+    const first = entries.toSorted((left, right) => left.data.occurredAt.localeCompare(right.data.occurredAt))[0]
+    if (!first) throw new Error('the plant of this test has no entries')
+    const setUpOn = first.data.occurredAt.slice(0, 10)
+    const clock = { setUpOn, timeZone: 'UTC' }
+    const cup = { ...bucket, netCupDepthCm: 5, heightCm: 36 }
+    const visit = (time: string, waterLevelCm: number) => entry(`${setUpOn}T${time}:00.000Z`, { waterLevelCm })
+    const later = entry(new Date(Date.parse(`${setUpOn}T12:00:00.000Z`) + 86_400_000).toISOString(), { waterLevelCm: 29 })
+    expect(refillLimitOf([visit('08:00', 20), visit('09:00', 31), later], cup, clock)).toBe(31)
+    expect(refillLimitOf([visit('08:00', 31), later, entry(later.data.occurredAt.replace('T12', 'T14'), { waterLevelCm: 20 })], cup, clock)).toBe(22)
   })
 })
 
