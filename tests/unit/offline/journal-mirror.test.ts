@@ -16,7 +16,7 @@ describe('the journal in memory', () => {
     const storage = createMemoryStorage()
     await storage.transact({}, () => ({ result: null, put: [[keys.base('entry', id), base]] }))
     const mirror = createJournalMirror('me')
-    expect(await mirror.load(storage)).toMatchObject([{ type: 'entry', id: 'a', record: { data: { note: 'old' }, unsent: false } }])
+    expect(await mirror.load(storage)).toMatchObject([{ type: 'entry', id, record: { data: { note: 'old' }, unsent: false } }])
     const [op] = await saveChanges(storage, around, [{ kind: 'patch', entityType: 'entry', entityId: id, fields: { note: 'new' } }])
     const changed = await mirror.refresh(storage, [keys.outbox(op?.deviceSeq ?? 0, op?.opId ?? '')])
     expect(changed).toMatchObject([{ id, record: { data: { note: 'new' }, unsent: true } }])
