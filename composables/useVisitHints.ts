@@ -7,7 +7,7 @@ import type { Vessel } from '#shared/domain/vessel.schema'
 import { useEntriesStore } from '~/stores/entries'
 import { usePlantsStore } from '~/stores/plants'
 import type { View } from '~/types/view'
-import { aboveLimitWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
+import { aboveLimitWords, aboveRimWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
 import type { LogForm } from '~/utils/log/log-form'
 import { dayOf, latestReadings, refillLimitOf } from '~/utils/plant/timeline'
 import { levelOf } from '~/utils/plant/vessel-water'
@@ -47,6 +47,8 @@ export function useVisitHints(
   const caution = computed(() => limitWords(limitCm.value, vessel.value))
   const levelCaution = computed(() => {
     const level = levelOf(form.value.readings, vessel.value)
+    const tooHigh = aboveRimWords(level, vessel.value)
+    if (tooHigh) return tooHigh
     return settingUp.value ? belowCupWords(level, vessel.value) : aboveLimitWords(level, limitCm.value, vessel.value)
   })
   const phIsOff = computed(() => (verdicts.value.ph?.side ?? 'in') !== 'in')

@@ -14,7 +14,6 @@ export function levelHints(readings: Readings, vessel: VesselFields | null): Par
   if (readings.waterLevelCm === null && readings.airGapCm !== null && level !== null) hints.waterLevelCm = `${number(level)} cm by the air gap`
   if (readings.airGapCm === null && readings.waterLevelCm !== null && gap !== null) hints.airGapCm = `${number(gap)} cm by the water level`
   if (readings.airGapCm !== null && readings.waterLevelCm === null && volume !== null) hints.airGapCm = `${litres(volume)} left`
-  if (vessel?.heightCm && level !== null && level > vessel.heightCm) hints.waterLevelCm = `the vessel is only ${number(vessel.heightCm)} cm high`
   return hints
 }
 
@@ -27,6 +26,12 @@ function withLitres(levelCm: number, vessel: VesselFields | null): string {
 export function limitWords(limitCm: number | null, vessel: VesselFields | null): string | null {
   if (limitCm === null) return null
   return `Fill to ${withLitres(limitCm, vessel)} at most. The roots above that breathe air and may be harmed under water.`
+}
+
+/** Said when a level lies above the rim: more often a slip of the finger than a flood. */
+export function aboveRimWords(levelCm: number | null, vessel: VesselFields | null): string | null {
+  if (levelCm === null || !vessel?.heightCm || levelCm <= vessel.heightCm) return null
+  return `The vessel is only ${number(vessel.heightCm)} cm high, and this says ${number(levelCm)} cm. Please look once more; you can save it as it is.`
 }
 
 /** Said when a level lies above the limit. It never keeps anybody from saving. */

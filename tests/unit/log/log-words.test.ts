@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { emptyVesselFields } from '#shared/domain/vessel.schema'
 import { issueSentence } from '~/utils/log/issue-words'
-import { aboveLimitWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
+import { aboveLimitWords, aboveRimWords, belowCupWords, levelHints, limitWords } from '~/utils/log/level-words'
 import { emptyLogForm } from '~/utils/log/log-form'
 import { rangeLines } from '~/utils/log/range-words'
 import { entryValueWords } from '~/utils/words/conflict'
@@ -19,7 +19,9 @@ describe('what a level means', () => {
   })
 
   it('is doubted above the rim', () => {
-    expect(levelHints(read({ waterLevelCm: 42 }), bucket).waterLevelCm).toBe('the vessel is only 30 cm high')
+    expect(aboveRimWords(42, bucket)).toMatch(/only 30 cm high, and this says 42 cm.*save it as it is/)
+    expect(aboveRimWords(30, bucket)).toBeNull()
+    expect(aboveRimWords(42, null)).toBeNull()
   })
 
   it('is warned of only above the limit', () => {
