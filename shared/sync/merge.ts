@@ -10,7 +10,6 @@ export type FieldChange = { from: unknown, to: unknown }
 /** One change in the history of a record, as far as merging needs it. */
 export type HistoryChange = {
   ver: number
-  deviceId: string
   fields: Record<string, FieldChange>
 }
 
@@ -31,20 +30,17 @@ export type PatchDecision = {
  *
  * @param current the record's fields as they stand
  * @param patch the fields that the writer set
- * @param deviceId the writer's device
- * @param unseen changes with a version above the one the writer was shown, oldest first
+ * @param unseen what other devices changed after the version the writer was shown, oldest first
  */
 export function decidePatch(
   current: Record<string, unknown>,
   patch: Record<string, unknown>,
-  deviceId: string,
   unseen: HistoryChange[],
 ): PatchDecision {
-  const foreign = unseen.filter(change => change.deviceId !== deviceId)
-  const decision: PatchDecision = { apply: {}, kept: {}, merged: foreign.some(change => Object.keys(change.fields).length > 0) }
+  const decision: PatchDecision = { apply: {}, kept: {}, merged: unseen.some(change => Object.keys(change.fields).length > 0) }
   for (const [field, value] of Object.entries(patch)) {
     if (sameValue(current[field], value)) continue
-    const first = foreign.find(change => field in change.fields)?.fields[field]
+    const first = unseen.find(change => field in change.fields)?.fields[field]
     if (!first) decision.apply[field] = value
     else if (SET_FIELDS.includes(field)) decision.apply[field] = mergeSets(first.from, current[field], value)
     else decision.kept[field] = value
@@ -72,9 +68,4 @@ export function sameValue(left: unknown, right: unknown): boolean {
     return left.length === right.length && left.every(item => right.includes(item))
   }
   return Object.is(left, right)
-}
-
-/** True when somebody else's device changed anything at all that the writer was not shown. */
-export function hasUnseenChanges(deviceId: string, unseen: HistoryChange[]): boolean {
-  return unseen.some(change => change.deviceId !== deviceId)
 }

@@ -137,6 +137,11 @@ describe('deleting an entry', () => {
     expect((await phone.notices('delete-refused')).map(row => row.data?.subjectId)).toContain(entry.entityId)
   })
 
+  it('is refused over an unseen comment even when its sender passes for the owner’s phone', async () => {
+    await mentor.done({ ...mentor.createComment(entry, { text: 'Who wrote this?' }), deviceId: phone.deviceId })
+    expect(await remove(phone, 1)).toMatchObject({ status: 'merged', code: 'delete_refused' })
+  })
+
   it('is refused when another phone changed it unseen', async () => {
     await change(tablet, 1, { note: 'more to say' })
     expect(await remove(phone, 1)).toMatchObject({ code: 'delete_refused' })

@@ -5,6 +5,7 @@ import { done, refuse } from './step'
 import type { Performed, Step } from './step'
 import type { StoredRecord } from './ports'
 import { touchParents } from './touch-parents'
+import { unseenChanges } from './unseen-changes'
 
 /** Merges a patch field by field; what another device wrote unseen stands, the other value is kept beside it. */
 export async function applyPatch(step: Step): Promise<Performed> {
@@ -12,8 +13,7 @@ export async function applyPatch(step: Step): Promise<Performed> {
   const { record } = situation
   if (!record) return refuse(op, 'not_found', 'What this belongs to is not there, or not yours to see.')
 
-  const unseen = await dependencies.repository.changesAfter(record.id, op.baseVer)
-  const decision = decidePatch(record.data, step.fields, op.deviceId, unseen)
+  const decision = decidePatch(record.data, step.fields, await unseenChanges(step, record))
   if (record.type === 'plant') {
     const issues = await checkPlantLinks(step, { ...record.data, ...decision.apply })
     if (issues.length > 0) return refuse(op, 'invalid', 'Something in this change needs another look.', issues)

@@ -25,6 +25,7 @@ export type EntityChange = HistoryChange & {
   entityId: string
   kind: ChangeKind
   accountId: string
+  deviceId: string
   opId: string | null
   at: string
 }
