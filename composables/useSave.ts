@@ -4,6 +4,8 @@ import { useJournalStore } from '~/stores/journal'
 import type { SaveOutcome } from '~/types/view'
 import { saveChanges } from '~/utils/offline/journal'
 import type { NewPhotoBytes } from '~/utils/offline/journal'
+import { forgetKeptPictures } from '~/utils/offline/pictures'
+import type { Phone } from '~/utils/offline/phone'
 import { StorageFull } from '~/utils/offline/ports'
 
 type Extras = { photos?: NewPhotoBytes[], endDraftOf?: string }
@@ -26,7 +28,7 @@ export function useSave() {
     const [first] = requests
     if (!phone || !first) return failure('Sign in first. What you typed is kept as a draft.')
     try {
-      await saveChanges(phone.storage, phone.around, requests, extras)
+      await saveMakingRoom(phone, requests, extras)
     } catch (error) {
       return failure(error instanceof StorageFull
         ? 'This phone has no room left for this. Free some space, or save without photos; what you typed is still here.'
@@ -39,6 +41,16 @@ export function useSave() {
   }
 
   return { save, newId: () => journal.phone?.around.newId() ?? crypto.randomUUID() }
+}
+
+/** A full phone first lets go of the copies of pictures that it keeps for seeing without signal. */
+async function saveMakingRoom(phone: Phone, requests: ChangeRequest[], extras: Extras): Promise<void> {
+  try {
+    await saveChanges(phone.storage, phone.around, requests, extras)
+  } catch (error) {
+    if (!(error instanceof StorageFull) || !await forgetKeptPictures(phone)) throw error
+    await saveChanges(phone.storage, phone.around, requests, extras)
+  }
 }
 
 function failure(message: string): SaveOutcome {

@@ -58,6 +58,17 @@ export async function fetchMissingPictures(phone: Pick<Phone, 'storage'>): Promi
   }
 }
 
+/**
+ * Makes room on a full phone: copies can be had again, what a person writes
+ * cannot. Tells whether there was anything to let go.
+ */
+export async function forgetKeptPictures({ storage }: Pick<Phone, 'storage'>): Promise<boolean> {
+  return storage.transact({ keys: [keys.keptPictures] }, (snapshot) => {
+    const kept = keptOf(snapshot)
+    return { result: kept.length > 0, remove: [keys.keptPictures, ...kept.map(keys.picture)] }
+  })
+}
+
 async function hasOwnBytes({ storage }: Pick<Phone, 'storage'>, sha256: string): Promise<boolean> {
   return (await storage.read({ keys: [keys.bytes(sha256)] })).get(keys.bytes(sha256)) !== undefined
 }
