@@ -1,7 +1,7 @@
 import { hashPassword, verifyPassword } from '#auth-server/password'
 import { atMost } from '../utils/at-most'
 
-/** Each hash takes 128 MiB for half a second; more at once would starve a small server. */
+/** Each hash takes 128 MiB (N = 2^17, r = 8) and a core; more at once would starve a small server. */
 const inTurn = atMost(2)
 
 /** The same characters typed on two keyboards are one password (NFC, RFC 8265 §4.2). */

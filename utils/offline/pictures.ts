@@ -8,7 +8,7 @@ import { readBases } from './stored-shapes'
 const LARGE_WIDTH = 1_280
 /** Width of the copies that are kept to be seen without signal, px. */
 const KEPT_WIDTH = 640
-/** Most copies kept, about 60 kB each. */
+/** Most copies kept. */
 const KEPT_MAX = 400
 const TIMEOUT_MILLISECONDS = 20_000
 
